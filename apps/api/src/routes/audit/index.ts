@@ -1,0 +1,3 @@
+import type { Route } from '../../http/route.ts';
+
+export const auditRoutes: readonly Route[] = [];
