@@ -1,0 +1,34 @@
+/** Name and version of the solver; part of the key of every evaluation. */
+export const SOLVER = { name: 'tipward-bem', version: '0.1.0' } as const;
+
+export { SolverInputError } from './input-error.ts';
+export { blendPolars, interpolateReynolds } from './airfoil/blend.ts';
+export type { ReynoldsTable } from './airfoil/blend.ts';
+export { compilePolar, lookUp } from './airfoil/polar.ts';
+export type { Polar, PolarInterpolation, PolarTable } from './airfoil/polar.ts';
+export { extendViterna, viternaAt, viternaConstants } from './airfoil/viterna.ts';
+export type { ViternaOptions } from './airfoil/viterna.ts';
+export { annualEnergy, windShareBelow } from './operation/annual-energy.ts';
+export type { PowerPoint, WindDistribution } from './operation/annual-energy.ts';
+export { isaAir } from './operation/atmosphere.ts';
+export { operatingSchedule } from './operation/schedule.ts';
+export type { Governor, SchedulePoint, ScheduleResult, ScheduleSpec } from './operation/schedule.ts';
+export { spanLoads } from './loads/span-loads.ts';
+export type { SpanLoads } from './loads/span-loads.ts';
+export { refineGeometry } from './rotor/refine-geometry.ts';
+export type { BladeStation, RefinedGeometry } from './rotor/refine-geometry.ts';
+export { compileRotor, STANDARD_AIR } from './rotor/rotor.ts';
+export type { Air, Rotor, RotorElement, RotorGeometry, RotorStation } from './rotor/rotor.ts';
+export { maximumCp, solveCurve } from './rotor/solve-curve.ts';
+export type { CurveResult } from './rotor/solve-curve.ts';
+export { solvePoint } from './rotor/solve-point.ts';
+export type { OperatingState, PointResult, PointStatus, SectionResult } from './rotor/solve-point.ts';
+export { buhlInduction, highInductionThrust } from './section/high-induction.ts';
+export { lossFactor, prandtlFactor } from './section/loss.ts';
+export { DEFAULT_OPTIONS, HIGH_INDUCTION, resolveOptions } from './section/options.ts';
+export type { HighInduction, SolverOptions } from './section/options.ts';
+export { emptyState, solveSection } from './section/solve-section.ts';
+export type { SectionInput, SectionState, SectionStatus } from './section/solve-section.ts';
+export { betzSection, schmitzSection } from './sizing/planform.ts';
+export { retwist } from './sizing/retwist.ts';
+export { sizeBlade } from './sizing/size-blade.ts';

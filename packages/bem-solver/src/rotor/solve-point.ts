@@ -1,0 +1,173 @@
+import { requireNumber } from '../input-error.ts';
+import type { SectionState, SectionStatus } from '../section/solve-section.ts';
+import { emptyState, solveSection } from '../section/solve-section.ts';
+import type { Rotor, RotorElement } from './rotor.ts';
+
+export interface OperatingState {
+  readonly windSpeedMS: number;
+  readonly rotorSpeedRadS: number;
+  readonly pitchDeg: number;
+}
+
+/** 'converged': every section solved. 'sections-unsolved': some have no admissible solution, so totals are null. */
+export type PointStatus = 'converged' | 'sections-unsolved';
+
+export interface SectionResult {
+  readonly radiusM: number;
+  readonly status: SectionStatus;
+  readonly inflowDeg: number | null;
+  readonly alphaDeg: number | null;
+  readonly axialInduction: number | null;
+  readonly tangentialInduction: number | null;
+  readonly lossFactor: number | null;
+  readonly cl: number | null;
+  readonly cd: number | null;
+  readonly relativeSpeedMS: number | null;
+  readonly normalForceNM: number | null;
+  readonly tangentialForceNM: number | null;
+  readonly reynolds: number | null;
+  readonly multipleRoots: boolean;
+}
+
+export interface PointResult {
+  readonly windSpeedMS: number;
+  readonly rotorSpeedRpm: number;
+  readonly tipSpeedRatio: number;
+  readonly pitchDeg: number;
+  readonly status: PointStatus;
+  /** Indices of the stations without a solution. */
+  readonly failedStations: readonly number[];
+  readonly cp: number | null;
+  readonly ct: number | null;
+  readonly cq: number | null;
+  readonly powerW: number | null;
+  readonly thrustN: number | null;
+  readonly torqueNm: number | null;
+  readonly rootFlapMomentNm: number | null;
+  readonly rootEdgeMomentNm: number | null;
+  readonly sections?: readonly SectionResult[];
+}
+
+/** Loads over ½ρV²: thrust and torque of the rotor, root moments of a blade. NaN where a section has no solution. */
+export interface UnitLoads {
+  thrust: number;
+  torque: number;
+  flap: number;
+  edge: number;
+}
+
+const DEG = 180 / Math.PI;
+
+/** Solves every element at a tip-speed ratio and adds its load; `visit` sees each state, which is reused. */
+export function solveUnit(
+  rotor: Rotor,
+  tipSpeedRatio: number,
+  pitchDeg: number,
+  scratch: SectionState,
+  visit?: (element: RotorElement, state: SectionState, index: number) => void,
+): UnitLoads {
+  const pitch = pitchDeg / DEG;
+  let thrust = 0;
+  let torque = 0;
+  let flap = 0;
+  let edge = 0;
+  for (let i = 0; i < rotor.elements.length; i += 1) {
+    const element = rotor.elements[i] as RotorElement;
+    const state = solveSection(
+      {
+        solidity: element.solidity,
+        localSpeedRatio: (tipSpeedRatio * element.radiusM) / rotor.tipRadiusM,
+        pitchRad: element.twistRad + pitch,
+        polar: element.polar,
+        loss: element.loss,
+      },
+      rotor.options,
+      scratch,
+    );
+    const pressure = state.speedSquared * element.chordM * element.widthM;
+    const arm = element.radiusM - rotor.hubRadiusM;
+    thrust += pressure * state.cn;
+    torque += pressure * state.ct * element.radiusM;
+    flap += pressure * state.cn * arm;
+    edge += pressure * state.ct * arm;
+    visit?.(element, state, i);
+  }
+  return { thrust: thrust * rotor.bladeCount, torque: torque * rotor.bladeCount, flap, edge };
+}
+
+const orNull = (value: number) => (Number.isFinite(value) ? value : null);
+
+function sectionResult(
+  rotor: Rotor,
+  element: RotorElement,
+  state: SectionState,
+  windSpeedMS: number,
+): SectionResult {
+  const solved = state.status === 'converged';
+  const speed = Math.sqrt(state.speedSquared) * windSpeedMS;
+  const pressure = 0.5 * rotor.air.densityKgM3 * state.speedSquared * windSpeedMS ** 2 * element.chordM;
+  const when = (value: number) => (solved ? orNull(value) : null);
+  const noLoad = state.status === 'no-load';
+  return {
+    radiusM: element.radiusM,
+    status: state.status,
+    inflowDeg: when(state.phi * DEG),
+    alphaDeg: when(state.alpha * DEG),
+    axialInduction: when(state.a),
+    tangentialInduction: when(state.aPrime),
+    lossFactor: noLoad ? 0 : when(state.F),
+    cl: when(state.cl),
+    cd: when(state.cd),
+    relativeSpeedMS: when(speed),
+    normalForceNM: noLoad ? 0 : when(pressure * state.cn),
+    tangentialForceNM: noLoad ? 0 : when(pressure * state.ct),
+    reynolds: when((rotor.air.densityKgM3 * speed * element.chordM) / rotor.air.viscosityPaS),
+    multipleRoots: state.multipleRoots,
+  };
+}
+
+/**
+ * One operating point.
+ * @param point wind speed [m/s] > 0, rotor speed [rad/s] ≥ 0, pitch [°] within ±360
+ * @returns totals and, asked for, the sections; null where undefined, never NaN
+ * Source: blade-element momentum theory as in docs/theory.md; integration by trapezoid over [Rh, stations, R].
+ * Throws SolverInputError on misuse.
+ */
+export function solvePoint(
+  rotor: Rotor,
+  point: OperatingState,
+  { sections = false }: { sections?: boolean } = {},
+): PointResult {
+  const wind = requireNumber('windSpeedMS', point.windSpeedMS, 0, Infinity, true);
+  const omega = requireNumber('rotorSpeedRadS', point.rotorSpeedRadS, 0);
+  requireNumber('pitchDeg', point.pitchDeg, -360, 360);
+  const tipSpeedRatio = (omega * rotor.tipRadiusM) / wind;
+  const failedStations: number[] = [];
+  const rows: SectionResult[] = [];
+  const loads = solveUnit(rotor, tipSpeedRatio, point.pitchDeg, emptyState(), (element, state, index) => {
+    if (state.status === 'no-solution') failedStations.push(index);
+    if (sections) rows.push(sectionResult(rotor, element, state, wind));
+  });
+  const solved = failedStations.length === 0;
+  const area = Math.PI * rotor.tipRadiusM ** 2;
+  const pressure = 0.5 * rotor.air.densityKgM3 * wind * wind;
+  const when = (value: number) => (solved ? orNull(value) : null);
+  const cq = loads.torque / (area * rotor.tipRadiusM);
+  return {
+    windSpeedMS: wind,
+    rotorSpeedRpm: (omega * 30) / Math.PI,
+    tipSpeedRatio,
+    pitchDeg: point.pitchDeg,
+    status: solved ? 'converged' : 'sections-unsolved',
+    failedStations,
+    cp: when(cq * tipSpeedRatio),
+    ct: when(loads.thrust / area),
+    cq: when(cq),
+    powerW: when(loads.torque * pressure * omega),
+    thrustN: when(loads.thrust * pressure),
+    torqueNm: when(loads.torque * pressure),
+    rootFlapMomentNm: when(loads.flap * pressure),
+    rootEdgeMomentNm: when(loads.edge * pressure),
+    ...(sections ? { sections: rows } : {}),
+  };
+}
