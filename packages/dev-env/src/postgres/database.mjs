@@ -1,0 +1,28 @@
+import { sql } from './cluster.mjs';
+
+/** The two roles (an owner who migrates, an application that owns nothing) and their database, made where missing. */
+export async function ensureDatabase(bin, cluster, name, secrets) {
+  const admin = cluster.url('postgres');
+  for (const [role, password] of [
+    ['tipward_owner', secrets.ownerPassword],
+    ['tipward_app', secrets.appPassword],
+  ]) {
+    await sql(
+      bin,
+      admin,
+      `DO $$ BEGIN CREATE ROLE ${role} LOGIN; EXCEPTION WHEN duplicate_object THEN NULL; END $$;
+       ALTER ROLE ${role} WITH LOGIN NOSUPERUSER NOCREATEDB NOCREATEROLE PASSWORD '${password}';`,
+    );
+  }
+  const exists = await sql(bin, admin, `SELECT 1 FROM pg_database WHERE datname = '${name}';`);
+  if (exists.trim() === '') await sql(bin, admin, `CREATE DATABASE ${name} OWNER tipward_owner;`);
+  return {
+    appUrl: cluster.url(name, 'tipward_app', secrets.appPassword),
+    ownerUrl: cluster.url(name, 'tipward_owner', secrets.ownerPassword),
+    created: exists.trim() === '',
+  };
+}
+
+export async function dropDatabase(bin, cluster, name) {
+  await sql(bin, cluster.url('postgres'), `DROP DATABASE IF EXISTS ${name} WITH (FORCE);`);
+}
