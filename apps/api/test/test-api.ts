@@ -17,6 +17,7 @@ export const PUBLIC_URL = 'http://tipward.test';
 function testConfig(databaseUrl: string): Config {
   return {
     mode: 'test',
+    host: '127.0.0.1',
     port: 0,
     publicUrl: PUBLIC_URL,
     databaseUrl,

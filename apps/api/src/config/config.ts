@@ -3,6 +3,8 @@ export type Mode = 'demo' | 'production' | 'test';
 /** Everything the server and the worker take from their surroundings; read once at start. */
 export interface Config {
   readonly mode: Mode;
+  /** Address the server binds to; loopback unless told otherwise. */
+  readonly host: string;
   readonly port: number;
   /** Origin that people see in the address bar; links in e-mails begin with it. No trailing slash. */
   readonly publicUrl: string;

@@ -15,6 +15,7 @@ const environment = z.object({
   TIPWARD_MODE: z.enum(['demo', 'production', 'test'], {
     error: 'TIPWARD_MODE is unknown; allowed: demo, production, test',
   }),
+  TIPWARD_HOST: z.string().default('127.0.0.1'),
   TIPWARD_PORT: port('TIPWARD_PORT').default(4180),
   TIPWARD_PUBLIC_URL: z
     .url({ protocol: /^https?$/u, error: 'TIPWARD_PUBLIC_URL is not an http(s) address' })
@@ -46,6 +47,7 @@ export function readConfig(env: Environment): Config {
     throw new ConfigError(['SMTP_URL is missing; allowed: smtp://host:port of the mail server']);
   return {
     mode: values.TIPWARD_MODE,
+    host: values.TIPWARD_HOST,
     port: values.TIPWARD_PORT,
     publicUrl: values.TIPWARD_PUBLIC_URL,
     databaseUrl: values.DATABASE_URL,

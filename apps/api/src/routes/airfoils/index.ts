@@ -1,3 +1,5 @@
-import type { Route } from '../../http/route.ts';
+import { addAirfoilRoute } from './add-airfoil.ts';
+import { getAirfoilRoute } from './get-airfoil.ts';
+import { listAirfoilsRoute } from './list-airfoils.ts';
 
-export const airfoilRoutes: readonly Route[] = [];
+export const airfoilRoutes = [listAirfoilsRoute, getAirfoilRoute, addAirfoilRoute];

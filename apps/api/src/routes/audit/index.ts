@@ -1,3 +1,4 @@
-import type { Route } from '../../http/route.ts';
+import { listAuditEventsRoute } from './list-audit-events.ts';
+import { verifyAuditRoute } from './verify-audit.ts';
 
-export const auditRoutes: readonly Route[] = [];
+export const auditRoutes = [listAuditEventsRoute, verifyAuditRoute];

@@ -1,3 +1,3 @@
-import type { Route } from '../../http/route.ts';
+import { listCaughtMailRoute } from './list-caught-mail.ts';
 
-export const mailRoutes: readonly Route[] = [];
+export const mailRoutes = [listCaughtMailRoute];

@@ -1,8 +1,7 @@
-import type { PersonRef } from '@tipward/contract';
 import { Person } from '../../models/person.ts';
-import { presentPersonRef } from '../../presenters/person-ref.ts';
+import { presentPersonRef, type PersonRefs } from '../../presenters/person-ref.ts';
 
-export type PersonRefs = (id: string) => PersonRef;
+export type { PersonRefs };
 
 /** Names of the people that records point to, in one query. People are never deleted, so each id has a name. */
 export async function loadPersonRefs(ids: Iterable<string>): Promise<PersonRefs> {
