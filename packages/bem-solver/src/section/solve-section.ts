@@ -72,6 +72,7 @@ interface Terms {
   /** sin φ/(1 − a) */
   h: number;
   g: number;
+  /** Size of the terms of g; cos φ is taken as 1, for at standstill all terms vanish with it. */
   scale: number;
   admissible: boolean;
 }
@@ -105,15 +106,15 @@ function evaluate(section: SectionInput, options: SolverOptions, phi: number, ou
         ? s * (5 / 3 - F) + Math.sqrt(Math.max(0, kappaTimes4Fs2 / 2 - F * (4 / 3 - F) * s * s))
         : s * inverseOneMinusA(options.highInduction, kappaTimes4Fs2 / (4 * F * s * s), F);
     out.g = 4 * F * s * (lambda * out.h - c) + sigma * ct;
-    out.scale = 4 * F * s * (lambda * out.h + Math.abs(c)) + sigma * (Math.abs(cl * s) + Math.abs(drag * c));
+    out.scale = 4 * F * s * (lambda * out.h + 1) + sigma * (Math.abs(cl * s) + Math.abs(drag));
     out.admissible = true;
     return out.g;
   }
   out.h = s + ((s < 0 ? -1 : 1) * kappaTimes4Fs2) / (4 * F * mag);
   out.g = 4 * F * mag * (lambda * s - c) + sigma * (lambda * cn + ct);
   out.scale =
-    4 * F * mag * (lambda * mag + Math.abs(c)) +
-    sigma * ((lambda * Math.abs(c) + mag) * Math.abs(cl) + (lambda * mag + Math.abs(c)) * Math.abs(drag));
+    4 * F * mag * (lambda * mag + 1) +
+    sigma * ((lambda * Math.abs(c) + mag) * Math.abs(cl) + (lambda * mag + 1) * Math.abs(drag));
   // The air must pass the way the inflow angle says: sinφ(1 − a) > 0.
   out.admissible = s < 0 ? kappaTimes4Fs2 > 4 * F * s * s : 4 * F * s * s + kappaTimes4Fs2 > 0;
   return out.g;

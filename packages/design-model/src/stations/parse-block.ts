@@ -106,7 +106,7 @@ export function parseStationBlock(text: string): StationBlock {
   const cells = lines.map((line) => splitLine(line, separator));
   const first = cells[0] ?? [];
   const isHeader = first.some((title) => /\p{L}/u.test(title)) && columnOf(first[0] ?? '') !== null;
-  const columns = isHeader ? first.map(columnOf) : first.map((_, i) => ORDER[i] ?? null);
+  const columns = isHeader ? first.map(columnOf) : ORDER;
   const body = isHeader ? cells.slice(1) : cells;
   const faults: CellFault[] = [];
   const kept = body.slice(0, MAX_STATIONS);
