@@ -22,7 +22,14 @@ const polar = compilePolar({
   cd: alphaDeg.map((a) => 0.008 + 1.2 * Math.sin(a * RAD) ** 2),
 });
 
-function blade(scale = 1, bladeCount = 3, chordFactor = 1): RotorGeometry {
+/** No stall jump: results are smooth in everything. */
+const smooth = compilePolar({
+  alphaDeg,
+  cl: alphaDeg.map((a) => 3 * Math.sin(2 * (a + 3) * RAD)),
+  cd: alphaDeg.map((a) => 0.008 + 1.2 * Math.sin(a * RAD) ** 2),
+});
+
+function blade(scale = 1, bladeCount = 3, chordFactor = 1, section = polar): RotorGeometry {
   const { stations } = sizeBlade({
     bladeCount: 3,
     hubRadiusM: 0.4,
@@ -41,7 +48,7 @@ function blade(scale = 1, bladeCount = 3, chordFactor = 1): RotorGeometry {
       radiusM: s.radiusM * scale,
       chordM: s.chordM * scale * chordFactor,
       twistDeg: s.twistDeg,
-      polar,
+      polar: section,
     })),
   };
 }
@@ -91,11 +98,6 @@ describe('a rotor', () => {
     expect(Math.abs((loads.flapMomentNm[0] ?? NaN) / (p.rootFlapMomentNm ?? NaN) - 1)).toBeLessThan(0.03);
   });
   it('halving the elements shows second-order convergence where the polar is smooth', () => {
-    const smooth = compilePolar({
-      alphaDeg,
-      cl: alphaDeg.map((a) => 3 * Math.sin(2 * (a + 3) * RAD)),
-      cd: alphaDeg.map((a) => 0.008 + 1.2 * Math.sin(a * RAD) ** 2),
-    });
     const stations = blade().stations.map((s) => ({
       radiusM: s.radiusM,
       chordM: s.chordM,
@@ -163,7 +165,7 @@ describe('an operating schedule', () => {
   const winds = Array.from({ length: 43 }, (_, i) => 3 + i * 0.5);
 
   it('goes from minimum speed over optimum and maximum speed to rated power, held exactly', () => {
-    const { points, ratedWindSpeedMS } = operatingSchedule(rotor(), spec, winds);
+    const { points, ratedWindSpeedMS } = operatingSchedule(rotor(blade(1, 3, 1, smooth)), spec, winds);
     const order = [...new Set(points.map((p) => p.governedBy))];
     expect(order).toEqual(['minimum-speed', 'optimum', 'maximum-speed', 'rated-power']);
     for (const p of points.filter((q) => q.governedBy === 'rated-power'))
@@ -173,14 +175,18 @@ describe('an operating schedule', () => {
     expect(pitches).toEqual([...pitches].sort((a, b) => a - b));
   });
   it('holds a thrust limit where one is given', () => {
-    const free = operatingSchedule(rotor(), spec, winds);
+    const free = operatingSchedule(rotor(blade(1, 3, 1, smooth)), spec, winds);
     const limit = 0.9 * Math.max(...free.points.map((p) => p.thrustN ?? 0));
-    const held = operatingSchedule(rotor(), { ...spec, thrustLimitN: limit }, winds);
+    const held = operatingSchedule(rotor(blade(1, 3, 1, smooth)), { ...spec, thrustLimitN: limit }, winds);
     for (const p of held.points) expect(p.thrustN).toBeLessThanOrEqual(limit * (1 + 1e-9));
     expect(held.points.some((p) => p.governedBy === 'thrust-limit')).toBe(true);
   });
   it('keeps one speed and pitch where stall regulates', () => {
-    const { points } = operatingSchedule(rotor(), { ...spec, control: 'fixed-speed-stall' }, winds);
+    const { points } = operatingSchedule(
+      rotor(blade(1, 3, 1, smooth)),
+      { ...spec, control: 'fixed-speed-stall' },
+      winds,
+    );
     expect(
       new Set(points.map((p) => `${p.rotorSpeedRadS.toFixed(4)} ${p.pitchDeg} ${p.governedBy}`)),
     ).toEqual(new Set(['7.0000 0 fixed-speed']));
