@@ -37,9 +37,14 @@ function callerOf(api: TestApi, cookie: string | null, csrf: string | null) {
 export const nobody = (api: TestApi) => callerOf(api, null, null);
 
 /** A live session without the round trip through sign-in, which has tests of its own. */
-export async function callAs(api: TestApi, person: Person) {
+export async function sessionOf(api: TestApi, person: Person): Promise<{ cookie: string; csrf: string }> {
   const { pair, familyId } = await api.context.db.transaction((transaction) =>
     startFamily(api.context, transaction, person.id),
   );
-  return callerOf(api, `${ACCESS_COOKIE}=${pair.access}`, csrfTokenOf(api.context, familyId));
+  return { cookie: `${ACCESS_COOKIE}=${pair.access}`, csrf: csrfTokenOf(api.context, familyId) };
+}
+
+export async function callAs(api: TestApi, person: Person) {
+  const { cookie, csrf } = await sessionOf(api, person);
+  return callerOf(api, cookie, csrf);
 }
