@@ -3,7 +3,7 @@ import { camberedOutline, circleOutline } from './outline.ts';
 import { cylinderPolar, inventedPolar } from './polar-formula.ts';
 
 /** Reynolds numbers of the set: the small rotor lives near the lower ones, the large near the upper. */
-const REYNOLDS = [5e5, 1.5e6, 6e6];
+const REYNOLDS = [4e5, 1.5e6, 1.2e7];
 
 const MEMBERS = [
   { name: 'SM-18', thicknessPct: 18, camberShare: 0.035 },

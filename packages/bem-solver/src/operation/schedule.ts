@@ -52,7 +52,7 @@ export interface ScheduleResult {
   readonly ratedWindSpeedMS: number | null;
 }
 
-const PITCH_STEP_DEG = 1;
+const PITCH_STEP_DEG = 3;
 const PITCH_TOLERANCE_DEG = 1e-10;
 
 interface Held {

@@ -1,5 +1,5 @@
 import { SolverInputError, requireNumber } from '../input-error.ts';
-import { goldenMaximum } from '../numerics/golden-section.ts';
+import { brentMaximum } from '../numerics/maximum.ts';
 import { emptyState } from '../section/solve-section.ts';
 import type { Rotor } from './rotor.ts';
 import { solveUnit } from './solve-point.ts';
@@ -35,7 +35,7 @@ export function solveCurve(
 const COARSE = 24;
 
 /**
- * The largest CP over λ at one pitch, refined by golden section to 1e-7 in λ around the best of a coarse march.
+ * The largest CP over λ at one pitch, refined by Brent's parabolic search to 1e-7 in λ around the best of a coarse march.
  * Null where no point of the march is solved.
  */
 export function maximumCp(
@@ -62,7 +62,7 @@ export function maximumCp(
     }
   }
   if (bestCp === -Infinity) return null;
-  const top = goldenMaximum(cpAt, at(Math.max(0, best - 1)), at(Math.min(COARSE, best + 1)), 1e-7);
+  const top = brentMaximum(cpAt, at(Math.max(0, best - 1)), at(Math.min(COARSE, best + 1)), 1e-7);
   return {
     tipSpeedRatio: top.x,
     cp: top.value,

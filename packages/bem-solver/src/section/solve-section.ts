@@ -60,8 +60,8 @@ export function emptyState(): SectionState {
 const EPSILON = 1e-6;
 const HALF_PI = Math.PI / 2;
 /** Stall hysteresis needs solidity: below this no second root was met in a million random sections. */
-const SCAN_SOLIDITY = 0.08;
-const SCAN_CELLS = 48;
+const SCAN_SOLIDITY = 0.12;
+const SCAN_CELLS = 40;
 const RESIDUAL_TOLERANCE = 1e-10;
 
 /** Terms of the balance at one inflow angle; one record is reused by a section's whole search. */

@@ -1,5 +1,5 @@
 import { requireNumber } from '../input-error.ts';
-import { goldenMaximum } from '../numerics/golden-section.ts';
+import { brentMaximum } from '../numerics/maximum.ts';
 import type { Rotor, RotorElement } from '../rotor/rotor.ts';
 import { emptyState, solveSection } from '../section/solve-section.ts';
 
@@ -10,7 +10,7 @@ const COARSE_DEG = 1;
 /**
  * The twist (°) of each element that gives its annulus the most power at a tip-speed ratio and pitch, chord held. Annuli
  * do not act on each other in blade-element momentum theory, so each is a search of its own: a march in 1° steps, then
- * golden section to 1e-4°. Elements without load (hub, tip, no chord) keep their twist.
+ * Brent's parabolic search to 1e-4°. Elements without load (hub, tip, no chord) keep their twist.
  */
 export function retwist(
   rotor: Rotor,
@@ -53,5 +53,5 @@ function bestTwist(rotor: Rotor, element: RotorElement, tipSpeedRatio: number, p
     }
   }
   if (most === -Infinity) return own;
-  return goldenMaximum(drive, best - COARSE_DEG, best + COARSE_DEG, 1e-4).x;
+  return brentMaximum(drive, best - COARSE_DEG, best + COARSE_DEG, 1e-4).x;
 }

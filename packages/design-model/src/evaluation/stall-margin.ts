@@ -1,7 +1,7 @@
 import type { DesignContent, Evaluation } from '@tipward/contract';
 
 /** Sections thicker than this are root fairings: their lift hardly matters and their stall is not a margin to keep. */
-const THICKEST_LIFTING_PCT = 45;
+export const THICKEST_LIFTING_PCT = 45;
 const OUTERMOST_SHARE = 0.97;
 
 /** Smallest stall margin along the lifting span at the design point, with its radius; null where no section has one. */

@@ -1,5 +1,6 @@
 import type { DesignContent, Evaluation, SpanPoint, Specification, Warning } from '@tipward/contract';
 import { chordRoughnessPct, twistRoughnessDeg } from './roughness.ts';
+import { THICKEST_LIFTING_PCT } from './stall-margin.ts';
 import type { ElementInfo, PreparedRotor } from './rotor-input.ts';
 
 /** Speed of sound at 15 °C, ISO 2533 standard atmosphere (m/s). */
@@ -62,6 +63,18 @@ function geometryWarnings(content: DesignContent, spec: Specification): Warning[
   return found;
 }
 
+/** Share of the span, by length, on which a test holds; elements are unevenly spaced. */
+function shareOfSpan(points: readonly SpanPoint[], test: (point: SpanPoint) => boolean): number {
+  let held = 0;
+  let whole = 0;
+  points.forEach((point, i) => {
+    const width = (points[i + 1]?.radiusM ?? point.radiusM) - (points[i - 1]?.radiusM ?? point.radiusM);
+    whole += width;
+    if (test(point)) held += width;
+  });
+  return whole === 0 ? 0 : held / whole;
+}
+
 function nearestStation(content: DesignContent, radiusM: number): number {
   return content.stations.reduce(
     (best, s, i) =>
@@ -95,17 +108,24 @@ export function collectWarnings(
   );
   add(
     'alpha-outside',
-    where((p, e) => p.alphaDeg !== null && (p.alphaDeg < e.measuredFromDeg || p.alphaDeg > e.measuredToDeg)),
+    where(
+      (p, e) =>
+        e.thicknessPct <= THICKEST_LIFTING_PCT &&
+        p.alphaDeg !== null &&
+        (p.alphaDeg < e.measuredFromDeg || p.alphaDeg > e.measuredToDeg),
+    ),
     (at) => `α lies in the extended range of the polars ${at} ${lambda}`,
   );
   add(
     'past-stall',
-    where((p, e) => e.thicknessPct <= 45 && p.stallMarginDeg !== null && p.stallMarginDeg < 0),
+    where(
+      (p, e) => e.thicknessPct <= THICKEST_LIFTING_PCT && p.stallMarginDeg !== null && p.stallMarginDeg < 0,
+    ),
     (at) => `Past stall ${at} ${lambda}`,
   );
   add(
     'reynolds-outside',
-    where((_, e) => e.reynoldsOutside),
+    where((_, e) => e.thicknessPct <= THICKEST_LIFTING_PCT && e.reynoldsOutside),
     (at) => `Reynolds number outside the polars ${at}`,
   );
   add(
@@ -114,12 +134,12 @@ export function collectWarnings(
     (at) => `Mach number above 0.3 ${at}: polars are incompressible`,
   );
   const loaded = where((p) => p.axialInduction !== null && p.axialInduction > 0.4);
-  if (loaded !== null && loaded.count > HIGH_INDUCTION_SHARE * points.length)
+  const share = shareOfSpan(points, (p) => p.axialInduction !== null && p.axialInduction > 0.4);
+  if (share > HIGH_INDUCTION_SHARE)
     add(
       'high-induction',
       loaded,
-      (at) =>
-        `Axial induction above 0.4 on ${Math.round((100 * loaded.count) / points.length)} % of the elements, ${at} ${lambda}`,
+      (at) => `Axial induction above 0.4 on ${Math.round(100 * share)} % of the span, ${at} ${lambda}`,
     );
   for (const foil of content.airfoils) {
     if (content.settings.surfaceState === 'soiled' && prepared.missingSoiled.includes(foil.name))

@@ -1,8 +1,8 @@
 import { retwist, sizeBlade } from '@tipward/bem-solver';
 import type { DesignContent, Specification, Station } from '@tipward/contract';
 import type { AirfoilData } from '../airfoil-data.ts';
-import { mixFor } from '../airfoil-data.ts';
 import { prepareRotor } from '../evaluation/rotor-input.ts';
+import { THICKEST_LIFTING_PCT } from '../evaluation/stall-margin.ts';
 
 export interface SizingInput {
   readonly specification: Specification;
@@ -88,12 +88,13 @@ export function sizeFromSpecification(input: SizingInput): { stations: Station[]
   return { stations, pitchDeg: 0 };
 }
 
-/** Share of span from which a section works as an airfoil and its twist is worth optimising. */
-const LIFTING_PCT = 45;
+/** Outward of this share the loss factor leaves the twist of an annulus no meaning of its own. */
+const LAST_SHARE = 0.92;
 
 /**
  * The same blade with the twist that gives each annulus the most power at the design tip-speed ratio and pitch; annuli
- * are independent in blade-element momentum theory. Root sections thicker than 45 % keep their twist.
+ * are independent in blade-element momentum theory. Root sections thicker than 45 % keep their twist; outward of 0.92 R
+ * the twist runs on in a straight line.
  */
 export function retwistContent({
   content,
@@ -104,17 +105,20 @@ export function retwistContent({
   specification: Specification;
   airfoils: readonly AirfoilData[];
 }): DesignContent {
-  const prepared = prepareRotor({ ...content, settings: { ...content.settings } }, specification, airfoils);
+  const prepared = prepareRotor(content, specification, airfoils);
   const best = retwist(prepared.rotor, {
     tipSpeedRatio: content.designTipSpeedRatio,
     pitchDeg: content.pitchDeg,
   });
   const radii = prepared.elements.map((element) => element.radiusM);
+  const last = LAST_SHARE * specification.tipRadiusM;
+  const before = 0.9 * last;
+  const [atLast, atBefore] = [twistAt(radii, best.twistDeg, last), twistAt(radii, best.twistDeg, before)];
+  const slope = (atLast - atBefore) / (last - before);
   const stations = content.stations.map((station) => {
-    const { a, b } = mixFor(airfoils, station.thicknessPct, station.airfoil);
-    if (station.thicknessPct > LIFTING_PCT || (a.thicknessPct > LIFTING_PCT && b.thicknessPct > LIFTING_PCT))
-      return station;
-    const twist = twistAt(radii, best.twistDeg, station.radiusM);
+    if (station.thicknessPct > THICKEST_LIFTING_PCT) return station;
+    const { radiusM } = station;
+    const twist = radiusM > last ? atLast + slope * (radiusM - last) : twistAt(radii, best.twistDeg, radiusM);
     return { ...station, twistDeg: rounded(twist, 2) };
   });
   return { ...content, stations };
