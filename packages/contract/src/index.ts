@@ -19,6 +19,8 @@ export * from './reviews/review.ts';
 export * from './releases/release.ts';
 export * from './audit/audit-event.ts';
 export * from './mail/mail-message.ts';
+export * from './solver/case.ts';
+export * from './solver/result.ts';
 export * from './auth/get-session.ts';
 export * from './auth/sign-in.ts';
 export * from './auth/refresh-session.ts';
