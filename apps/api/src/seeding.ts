@@ -37,3 +37,4 @@ export { setMember } from './services/people/set-member.ts';
 export { createProgramme } from './services/programmes/create-programme.ts';
 export { issueSpecification } from './services/programmes/issue-specification.ts';
 export { addAirfoil } from './services/airfoils/add-airfoil.ts';
+export { createApp } from './app.ts';
