@@ -7,7 +7,12 @@ export interface SceneColors {
   readonly station: string;
 }
 
-const NAMES = { blade: '--blade', ghost: '--series-2', ring: '--accent', station: '--ink-soft' } as const;
+const NAMES = {
+  blade: '--rule-strong',
+  ghost: '--series-2',
+  ring: '--accent',
+  station: '--ink-soft',
+} as const;
 const FALLBACK: SceneColors = { blade: '#c9c4b4', ghost: '#5a6f8c', ring: '#c8502a', station: '#5b6472' };
 
 function read(): string {
