@@ -74,7 +74,7 @@ module.exports = {
     ),
     rule(
       'models-import-no-model',
-      { path: '^apps/api/src/models/', pathNot: TEST },
+      { path: '^apps/api/src/models/', pathNot: [TEST, 'init-models'] },
       { path: '^apps/api/src/models/' },
       'Models import no model.',
     ),

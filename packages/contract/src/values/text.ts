@@ -1,6 +1,9 @@
 import { z } from 'zod';
 
-const CONTROL = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f\u2028\u2029]/u;
+/** Control characters other than tab and line breaks, and the separators that some programs take for line breaks. */
+const CONTROL = /[\p{Cc}\u2028\u2029]/u;
+const ALLOWED_CONTROL = /[\t\n\r]/gu;
+const holdsControl = (text: string) => CONTROL.test(text.replace(ALLOWED_CONTROL, ''));
 /** Bidirectional overrides could make a name read as another; marks and isolates of honest right-to-left text stay. */
 const OVERRIDE = /[\u202a-\u202e]/u;
 
@@ -12,7 +15,7 @@ function clean(label: string, max: number) {
     .min(1, `${label} is empty; ${allowed}`)
     .max(max, `${label} is too long; ${allowed}`)
     .refine(
-      (text) => !CONTROL.test(text) && !OVERRIDE.test(text),
+      (text) => !holdsControl(text) && !OVERRIDE.test(text),
       `${label} holds control characters; ${allowed}`,
     );
 }
@@ -34,7 +37,7 @@ export const optionalProse = (label: string, max = 4000) =>
     .trim()
     .max(max, `${label} is too long; allowed: at most ${max} characters`)
     .refine(
-      (text) => !CONTROL.test(text) && !OVERRIDE.test(text),
+      (text) => !holdsControl(text) && !OVERRIDE.test(text),
       `${label} holds control characters; allowed: plain text`,
     )
     .default('');

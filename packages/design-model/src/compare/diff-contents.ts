@@ -53,9 +53,11 @@ function pairStations(before: readonly Station[], after: readonly Station[]): St
   return rows;
 }
 
-function diffFields(before: Record<string, unknown>, after: Record<string, unknown>): FieldDifference[] {
+type Fields = Readonly<Record<string, string | number | boolean>>;
+
+function diffFields(before: Fields, after: Fields): FieldDifference[] {
   const fields = [...new Set([...Object.keys(before), ...Object.keys(after)])];
-  const shown = (value: unknown) => (value === undefined ? '–' : String(value));
+  const shown = (value: string | number | boolean | undefined) => (value === undefined ? '–' : String(value));
   return fields
     .filter((field) => before[field] !== after[field])
     .map((field) => ({ field, before: shown(before[field]), after: shown(after[field]) }));

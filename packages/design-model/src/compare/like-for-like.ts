@@ -5,7 +5,7 @@ interface Item {
   readonly evaluation: Evaluation | null;
 }
 
-const varies = <T>(items: readonly T[]) => new Set(items.map((item) => JSON.stringify(item))).size > 1;
+const varies = (items: readonly unknown[]) => new Set(items.map((item) => JSON.stringify(item))).size > 1;
 
 /** Names every way in which the inputs of a comparison differ beyond the blade itself; empty when it is like for like. */
 export function likeForLike(items: readonly Item[]): string[] {
