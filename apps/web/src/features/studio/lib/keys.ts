@@ -20,6 +20,6 @@ export const STUDIO_KEYS: readonly KeyHelp[] = [
   { keys: ['Ctrl + S'], does: 'Save the draft now' },
   {
     keys: ['Home', 'End'],
-    does: 'First and last column of the row (with Ctrl: first and last station); ends of a plot’s cursor',
+    does: 'First and last column of the row (with Ctrl: first and last cell); ends of a plot’s cursor',
   },
 ];
