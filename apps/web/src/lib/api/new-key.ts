@@ -1,0 +1,6 @@
+/** A fresh Idempotency-Key: 128 random bits. (crypto.randomUUID is missing on pages served without TLS.) */
+export function newKey(): string {
+  return [...crypto.getRandomValues(new Uint8Array(16))]
+    .map((byte) => byte.toString(16).padStart(2, '0'))
+    .join('');
+}
