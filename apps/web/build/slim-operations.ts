@@ -1,4 +1,4 @@
-import { parseAst } from 'vite';
+import { parseSync } from 'vite';
 import type { Plugin } from 'vite';
 
 /** The browser sends what TypeScript has checked and parses bodies alone; these schemas are only types there. */
@@ -31,7 +31,9 @@ function callsOf(node: unknown): Call[] {
  * It keeps the schema library off the first page.
  */
 export function slimOperations(code: string): string {
-  const properties = callsOf(parseAst(code)).flatMap((call) => call.arguments?.[0]?.properties ?? []);
+  const properties = callsOf(parseSync('operation.js', code).program).flatMap(
+    (call) => call.arguments?.[0]?.properties ?? [],
+  );
   return properties
     .filter(({ key, value }) => UNREAD.has(key?.name ?? '') && value?.raw !== 'null')
     .toSorted((a, b) => b.start - a.start)
