@@ -9,6 +9,9 @@ import { routes } from './routes/index.ts';
 
 const BODY_LIMIT = '4mb';
 
+/** Numbers are made below, as text; the logger's type allows more. */
+const requestId = (id: unknown): string => (typeof id === 'string' ? id : '');
+
 /** The application without a listening socket. */
 export function createApp(context: Context): Express {
   const app = express();
@@ -24,7 +27,7 @@ export function createApp(context: Context): Express {
     }),
   );
   app.use((request, response, next) => {
-    response.set('X-Request-Id', String(request.id));
+    response.set('X-Request-Id', requestId(request.id));
     next();
   });
   app.use(securityHeaders(context.config));

@@ -1,4 +1,4 @@
-import { operations } from '@tipward/contract';
+import { operations, type Method } from '@tipward/contract';
 import request from 'supertest';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { CALLERS, type CallerName, type RightsRow } from '../test/rights/rights-row.ts';
@@ -60,12 +60,10 @@ describe('a change', () => {
       const session = await sessionOf(world.api, world.people.administrator);
       const other = await sessionOf(world.api, world.people.lead);
       const path = operation.path.replaceAll(/:\w+/gu, world.programme.id);
+      const agent = request(world.api.app);
+      const start = (method: Method, to: string) => agent[method](to);
       const send = (headers: Record<string, string>) =>
-        request(world.api.app)
-          [operation.method](`/api/v1${path}`)
-          .set('Cookie', session.cookie)
-          .set(headers)
-          .send({});
+        start(operation.method, `/api/v1${path}`).set('Cookie', session.cookie).set(headers).send({});
       for (const headers of [
         {},
         { 'X-CSRF-Token': other.csrf },

@@ -5,8 +5,6 @@ import { startFamily } from '../src/services/auth/token-families.ts';
 import { ACCESS_COOKIE } from '../src/services/auth/session-cookies.ts';
 import type { TestApi } from './test-api.ts';
 
-export type Caller = ReturnType<typeof callerOf>;
-
 /** Sends requests as one person: cookie and CSRF token go along, and each answer is a supertest test. */
 function callerOf(api: TestApi, cookie: string | null, csrf: string | null) {
   const send = (method: 'get' | 'post' | 'put' | 'patch' | 'delete', path: string) => {

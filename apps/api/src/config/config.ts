@@ -1,4 +1,4 @@
-export type Mode = 'demo' | 'production' | 'test';
+type Mode = 'demo' | 'production' | 'test';
 
 /** Everything the server and the worker take from their surroundings; read once at start. */
 export interface Config {

@@ -24,7 +24,7 @@ export function createMigrator(db: Sequelize, log: (message: string) => void): U
     logger: {
       info: (event) => {
         if (event['event'] === 'migrated' || event['event'] === 'reverted')
-          log(`${String(event['event'])} ${String(event['name'])}`);
+          log(`${event['event']} ${String(event['name'])}`);
       },
       warn: (event) => {
         log(JSON.stringify(event));

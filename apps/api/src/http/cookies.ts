@@ -12,7 +12,7 @@ export interface Cookies {
   clear: (name: string, path: string) => void;
 }
 
-export function parseCookies(header: string | undefined): ReadonlyMap<string, string> {
+function parseCookies(header: string | undefined): ReadonlyMap<string, string> {
   const found = new Map<string, string>();
   for (const pair of (header ?? '').split(';')) {
     const at = pair.indexOf('=');

@@ -3,7 +3,7 @@ import type { Problem } from '@tipward/contract';
 import { PROBLEMS, type AppError } from './app-error.ts';
 
 /** Problem details by RFC 9457. The type is a stable name rather than an address: nothing has to answer there. */
-export function problemOf(error: AppError, instance: string): Problem {
+function problemOf(error: AppError, instance: string): Problem {
   const { status, title } = PROBLEMS[error.code];
   const { faults, current, currentETag } = error.particulars;
   return {

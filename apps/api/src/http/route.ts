@@ -50,7 +50,7 @@ export function route<O extends Operation>(
   options: Options = {},
 ): Route {
   if (operation.access === 'public') throw new Error(`${operation.id} is public: use publicRoute`);
-  return { operation, before: options.before ?? [], handle: handle as Route['handle'] };
+  return { operation, before: options.before ?? [], handle };
 }
 
 /** Ties a handler to an operation that anyone may call; the actor is null for nobody. */
@@ -60,5 +60,5 @@ export function publicRoute<O extends Operation>(
   options: Options = {},
 ): Route {
   if (operation.access !== 'public') throw new Error(`${operation.id} needs a session: use route`);
-  return { operation, before: options.before ?? [], handle: handle as Route['handle'] };
+  return { operation, before: options.before ?? [], handle };
 }

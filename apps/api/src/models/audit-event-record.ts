@@ -32,7 +32,9 @@ export function initAuditEventRecord(sequelize: Sequelize): void {
         primaryKey: true,
         allowNull: false,
         get(this: AuditEventRecord) {
-          return Number(this.getDataValue('sequence'));
+          // PostgreSQL hands a bigint over as text.
+          const text: unknown = this.getDataValue('sequence');
+          return Number(text);
         },
       },
       at: { type: DataTypes.DATE(3), allowNull: false },

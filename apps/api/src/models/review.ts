@@ -26,7 +26,9 @@ export function initReview(sequelize: Sequelize): void {
         autoIncrementIdentity: true,
         autoIncrement: true,
         get(this: Review) {
-          return Number(this.getDataValue('ordinal'));
+          // PostgreSQL hands a bigint over as text.
+          const text: unknown = this.getDataValue('ordinal');
+          return Number(text);
         },
       },
       versionId: { type: DataTypes.UUID, allowNull: false },

@@ -20,7 +20,7 @@ export const canSeeWork = (actor: Actor, programme: InProgramme): boolean =>
   ['aerodynamicist', 'lead'].includes(roleIn(actor, programme) ?? '');
 
 /** Designs, drafts, versions, asking for review and comments. */
-export const canAuthor = canSeeWork;
+export const canAuthor = (actor: Actor, programme: InProgramme): boolean => canSeeWork(actor, programme);
 
 /** Rename, issue the specification, decide reviews, release. */
 export const canLead = (actor: Actor, programme: InProgramme): boolean => roleIn(actor, programme) === 'lead';

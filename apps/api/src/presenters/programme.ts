@@ -4,7 +4,7 @@ import { canAuthor, canLead, canManageMembers, canSeeWork, roleIn } from '../pol
 import type { PersonRefs } from './person-ref.ts';
 import { presentSpecificationIssue, type SpecificationIssueRecord } from './specification-issue.ts';
 
-export interface ProgrammeRecord {
+interface ProgrammeRecord {
   readonly id: string;
   readonly name: string;
   readonly summary: string;

@@ -6,7 +6,7 @@ export const CALLERS = ['nobody', 'administrator', 'aerodynamicist', 'lead', 're
 export type CallerName = (typeof CALLERS)[number];
 
 /** One request. Whatever a request uses up (an invitation, a draft) it makes anew each time. */
-export interface RightsRequest {
+interface RightsRequest {
   readonly params?: Readonly<Record<string, string>>;
   readonly query?: string;
   readonly body?: object;

@@ -23,10 +23,8 @@ const jar = ({ cookies }: Browser) => [...cookies].map(([name, value]) => `${nam
 
 /** Sends as a browser would: keeps the cookies of the answer and its CSRF token. */
 async function send(from: Browser, method: 'get' | 'post', path: string, body?: object) {
-  const test = request(api().app)
-    [method](`/api/v1${path}`)
-    .set('Cookie', jar(from))
-    .set('Origin', PUBLIC_URL);
+  const agent = request(api().app);
+  const test = agent[method](`/api/v1${path}`).set('Cookie', jar(from)).set('Origin', PUBLIC_URL);
   if (from.csrf !== null) test.set('X-CSRF-Token', from.csrf);
   const answer = await test.send(body);
   for (const line of (answer.headers['set-cookie'] as unknown as string[] | undefined) ?? []) {

@@ -5,7 +5,7 @@ import type { Actor } from '../../policies/actor.ts';
 import { canLead, canSeeWork } from '../../policies/programmes.ts';
 
 type Attention = ProgrammeSummary['attention'];
-export const NOTHING_WAITS: Attention = {
+const NOTHING_WAITS: Attention = {
   reviewsToDecide: 0,
   versionsSentBack: 0,
   openDrafts: 0,
