@@ -40,6 +40,13 @@ export function operation<
   return definition;
 }
 
+/** An operation that answers with a file. */
+export function download<P extends z.ZodType | null>(
+  definition: Operation<P, null, null, null> & { readonly binary: string },
+): Operation<P, null, null, null> & { readonly binary: string } {
+  return definition;
+}
+
 type Parsed<S> = S extends z.ZodType ? z.output<S> : undefined;
 type Given<S> = S extends z.ZodType ? z.input<S> : undefined;
 

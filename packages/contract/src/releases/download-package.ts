@@ -1,8 +1,8 @@
 import { z } from 'zod';
-import { operation } from '../operation.ts';
+import { download } from '../operation.ts';
 import { idValue } from '../values/text.ts';
 
-export const downloadPackage = operation({
+export const downloadPackage = download({
   id: 'releases.download-package',
   summary: 'The release package (ZIP)',
   method: 'get',
