@@ -32,7 +32,7 @@ export function usePlotCursor({ x, onCursor, scale, step, follows }: PlotCursor)
   };
   return {
     onPointerDown: (event: PointerEvent<HTMLElement>) => {
-      event.currentTarget.setPointerCapture?.(event.pointerId);
+      event.currentTarget.setPointerCapture(event.pointerId);
       move(event);
     },
     onPointerMove: (event: PointerEvent<HTMLElement>) => {

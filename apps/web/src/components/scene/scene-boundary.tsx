@@ -6,7 +6,7 @@ export class SceneBoundary extends Component<
   { fallback: (reason: string) => ReactNode; children: ReactNode },
   { reason: string | null }
 > {
-  override state = { reason: null };
+  override state: { reason: string | null } = { reason: null };
 
   static getDerivedStateFromError(error: unknown): { reason: string } {
     return { reason: error instanceof Error ? error.message : String(error) };

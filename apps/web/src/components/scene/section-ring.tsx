@@ -4,6 +4,22 @@ import { useEffect, useLayoutEffect, useMemo } from 'react';
 import { BufferAttribute, BufferGeometry, Line, LineBasicMaterial } from 'three';
 import { writeSection } from './surface-rows.ts';
 
+/** Writes a section into the line's own buffers. */
+function drawRing(
+  { geometry, material }: Line<BufferGeometry, LineBasicMaterial>,
+  surface: BladeSurface,
+  radiusM: number | null,
+  color: string,
+  opacity: number,
+): void {
+  const position = geometry.getAttribute('position');
+  const drawn = radiusM !== null && writeSection(surface, radiusM, position.array as Float32Array);
+  position.needsUpdate = true;
+  material.color.set(color);
+  material.opacity = opacity;
+  geometry.setDrawRange(0, drawn ? surface.columns : 0);
+}
+
 /** The section of the blade at a radius as a line around it; hidden off the blade. */
 export function SectionRing({
   surface,
@@ -34,14 +50,8 @@ export function SectionRing({
     [ring],
   );
   useLayoutEffect(() => {
-    const { geometry, material } = ring;
-    const position = geometry.getAttribute('position');
-    const drawn = radiusM !== null && writeSection(surface, radiusM, position.array as Float32Array);
-    position.needsUpdate = true;
-    material.color.set(color);
-    material.opacity = opacity;
-    geometry.setDrawRange(0, drawn ? columns : 0);
+    drawRing(ring, surface, radiusM, color, opacity);
     invalidate();
-  }, [ring, surface, radiusM, color, opacity, columns, invalidate]);
+  }, [ring, surface, radiusM, color, opacity, invalidate]);
   return <primitive object={ring} />;
 }

@@ -5,6 +5,20 @@ import { OrbitControls } from 'three/addons/controls/OrbitControls.js';
 import type { BladeView, SpanFraming } from './blade-views.ts';
 import { BLADE_VIEWS } from './blade-views.ts';
 
+/** Puts the camera where a named view looks from, the span on the shared axis. */
+function standAt(camera: OrthographicCamera, framing: SpanFraming, view: BladeView): void {
+  const { from, up } = BLADE_VIEWS[view];
+  const length = Math.hypot(...from);
+  const reach = framing.distanceM / length;
+  camera.up.set(up[0], up[1], up[2]);
+  camera.position.set(framing.centreM + from[0] * reach, from[1] * reach, from[2] * reach);
+  camera.zoom = framing.zoom;
+  camera.near = 0.01;
+  camera.far = 2 * framing.distanceM;
+  camera.lookAt(framing.centreM, 0, 0);
+  camera.updateProjectionMatrix();
+}
+
 /** Holds the camera: a named view on the shared axis, until a drag orbits away from it. */
 export function SpanCamera({
   framing,
@@ -50,16 +64,7 @@ export function SpanCamera({
 
   useLayoutEffect(() => {
     if (!(camera instanceof OrthographicCamera)) return;
-    const { from, up } = BLADE_VIEWS[view];
-    const length = Math.hypot(...from);
-    const reach = framing.distanceM / length;
-    camera.up.set(up[0], up[1], up[2]);
-    camera.position.set(framing.centreM + from[0] * reach, from[1] * reach, from[2] * reach);
-    camera.zoom = framing.zoom;
-    camera.near = 0.01;
-    camera.far = 2 * framing.distanceM;
-    camera.lookAt(framing.centreM, 0, 0);
-    camera.updateProjectionMatrix();
+    standAt(camera, framing, view);
     invalidate();
   }, [camera, framing, view, viewSerial, invalidate]);
 

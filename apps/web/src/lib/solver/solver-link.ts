@@ -55,7 +55,7 @@ export class SolverLink {
     this.serial += 1;
     const serial = this.serial;
     return new Promise<SolverCalls[C]['output']>((resolve, reject) => {
-      this.waiting.set(serial, { resolve: resolve as (output: never) => void, reject });
+      this.waiting.set(serial, { resolve: resolve, reject });
       port.postMessage({ serial, call, input } as SolverRequest);
     });
   }

@@ -1,12 +1,14 @@
-import { fireEvent, render, screen, within } from '@testing-library/react';
+import { cleanup, fireEvent, render, screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { checkDraft } from '@tipward/design-model';
 import { useReducer } from 'react';
-import { describe, expect, it, vi } from 'vitest';
+import { afterEach, describe, expect, it, vi } from 'vitest';
 import { notesByRow } from '../lib/row-notes.ts';
 import { startState, studioReducer } from '../lib/studio-reducer.ts';
 import { sampleDraft } from '../test/sample-draft.ts';
 import { StationGrid } from './station-grid.tsx';
+
+afterEach(cleanup);
 
 Element.prototype.scrollIntoView = vi.fn();
 

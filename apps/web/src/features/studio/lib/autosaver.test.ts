@@ -26,7 +26,7 @@ const stale = () =>
     title: 'Stale',
     status: 412,
     code: 'stale',
-    current: { content: theirs, updatedAt: '2026-01-01T10:00:00Z' } as Partial<Draft>,
+    current: { content: theirs, updatedAt: '2026-01-01T10:00:00Z' },
     currentETag: '"7"',
   });
 

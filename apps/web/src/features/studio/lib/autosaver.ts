@@ -75,7 +75,7 @@ export class Autosaver {
       this.saving = null;
     });
     await this.saving;
-    if (this.unsaved !== null && this.state.kind === 'waiting')
+    if (this.unsaved !== null && this.getState().kind === 'waiting')
       this.schedule(this.settings.debounceMs ?? DEBOUNCE_MS);
   }
 
