@@ -22,6 +22,11 @@ export function createApp(context: Context): Express {
     pinoHttp({
       logger: context.log,
       genReqId: () => randomUUID(),
+      // Who asked what, and how it ended; no headers, so no cookie or token ever stands in a log.
+      serializers: {
+        req: ({ id, method, url }: { id: unknown; method: string; url: string }) => ({ id, method, url }),
+        res: ({ statusCode }: { statusCode: number }) => ({ statusCode }),
+      },
       customLogLevel: (_request, response, error) =>
         error !== undefined || response.statusCode >= 500 ? 'error' : 'info',
     }),

@@ -14,18 +14,11 @@ export interface Context {
   readonly caughtMail: CaughtMail | null;
 }
 
-const HIDDEN = [
-  'req.headers.cookie',
-  'req.headers.authorization',
-  'req.headers["x-csrf-token"]',
-  'res.headers["set-cookie"]',
-];
-
 export function createContext(config: Config, caughtMail: CaughtMail | null = null): Context {
   return {
     config,
     db: connect(config.databaseUrl, config.databasePoolSize),
-    log: pino({ level: config.logLevel, redact: { paths: HIDDEN, censor: 'hidden' } }),
+    log: pino({ level: config.logLevel }),
     caughtMail,
   };
 }

@@ -145,6 +145,30 @@ describe('migrate', () => {
   });
 });
 
+describe('invite-administrator', () => {
+  it('lets the first person in, and no second one', async () => {
+    const database = await createTestDatabase();
+    try {
+      const env = {
+        TIPWARD_MODE: 'test',
+        TIPWARD_PUBLIC_URL: 'http://127.0.0.1:4180',
+        DATABASE_URL: database.appUrl,
+        TIPWARD_SECRET: 's'.repeat(32),
+      };
+      const named = ['--email', 'Wren@example.org', '--name', 'Wren'];
+      const first = await run('invite-administrator', named, env);
+      expect(first.code).toBe(0);
+      expect(first.out).toMatch(/http:\/\/127\.0\.0\.1:4180\/accept-invitation#token=\S{43}\n$/u);
+      const second = await run('invite-administrator', named, env);
+      expect([second.code, second.out]).toEqual([2, '']);
+      expect(second.err).toContain('has people already');
+      expect((await run('invite-administrator', ['--name', 'Wren'], env)).err).toContain('E-mail is missing');
+    } finally {
+      await database.drop();
+    }
+  });
+});
+
 describe('verify-release', () => {
   let folder: string;
   beforeAll(async () => {

@@ -8,15 +8,9 @@ export function hashPassword(context: Context, password: string): Promise<string
   return bcrypt.hash(password, context.config.passwordCost);
 }
 
-const decoys = new Map<number, Promise<string>>();
-
-function decoyHash(cost: number): Promise<string> {
-  const known = decoys.get(cost);
-  if (known !== undefined) return known;
-  const made = bcrypt.hash('no person has this password', cost);
-  decoys.set(cost, made);
-  return made;
-}
+/** A hash of the usual form that no password is known for; at the same cost it takes as long to compare. */
+const decoyHash = (cost: number): string =>
+  `$2b$${String(cost).padStart(2, '0')}$Ro0CUfOqk6cXEKf3dyaM7OhSCvnwM9s4wIX9JeLapehKK5YdLxKcm`;
 
 /** Whether the password is the right one. Takes as long where there is no hash to hold it against. */
 export async function passwordMatches(
@@ -24,6 +18,6 @@ export async function passwordMatches(
   password: string,
   hash: string | null,
 ): Promise<boolean> {
-  const equal = await bcrypt.compare(password, hash ?? (await decoyHash(context.config.passwordCost)));
+  const equal = await bcrypt.compare(password, hash ?? decoyHash(context.config.passwordCost));
   return equal && hash !== null && Buffer.byteLength(password) <= MAX_BYTES;
 }
