@@ -1,5 +1,7 @@
 import { SolverInputError } from '../input-error.ts';
 import { pchipSlopes } from '../numerics/pchip.ts';
+import type { PolarNodes } from './polar-nodes.ts';
+import { polarNodes } from './polar-nodes.ts';
 
 /** Coefficients against angle of attack in degrees; α ascends within [−180, 180]; columns of one length. */
 export interface PolarTable {
@@ -10,15 +12,20 @@ export interface PolarTable {
 
 export type PolarInterpolation = 'linear' | 'monotone-cubic';
 
-/** A polar ready for the kernel: α in rad over one full turn and a bit, periodic. */
-export interface Polar {
+/** Columns of a compiled polar: α in rad over one full turn and a bit; slopes (1/rad) where the interpolation is cubic. */
+export interface PolarColumns {
   readonly alpha: Float64Array;
   readonly cl: Float64Array;
   readonly cd: Float64Array;
   readonly clSlope: Float64Array | null;
   readonly cdSlope: Float64Array | null;
+}
+
+/** A polar ready for the kernel; periodic. */
+export interface Polar extends PolarColumns {
   /** Cell of each of `BUCKETS` even slices of the turn: the first candidate of a look-up. */
   readonly bucket: Int32Array;
+  readonly nodes: PolarNodes;
 }
 
 const BUCKETS = 512;
@@ -80,46 +87,75 @@ export function compilePolar(
     bucket[k] = cell;
   }
   const cubic = interpolation === 'monotone-cubic';
-  return {
+  const columns = {
     alpha,
     cl,
     cd,
-    bucket,
     clSlope: cubic ? pchipSlopes(alpha, cl) : null,
     cdSlope: cubic ? pchipSlopes(alpha, cd) : null,
   };
+  return { ...columns, bucket, nodes: polarNodes(columns, closed === rows ? 0 : 1) };
 }
 
-/** Coefficients at an angle of attack (rad, any turn): cl into out[0], cd into out[1]. */
+/** Places in the record of a look-up. */
+export const LIFT = 0;
+export const DRAG = 1;
+export const LIFT_SLOPE = 2;
+export const DRAG_SLOPE = 3;
+/** Angles (rad) between which the coefficients are one smooth piece, in the turn of the angle asked for. */
+export const PIECE_FROM = 4;
+export const PIECE_TO = 5;
+
+/** Coefficients and their slopes (1/rad) at an angle of attack (rad, any turn), into `out` of 6 places. */
 export function lookUp(polar: Polar, angle: number, out: Float64Array): void {
-  let alpha = angle;
-  if (alpha > Math.PI || alpha < -Math.PI) alpha -= TURN * Math.round(alpha / TURN);
+  let turn = 0;
+  if (angle > Math.PI || angle < -Math.PI) turn = TURN * Math.round(angle / TURN);
+  const alpha = angle - turn;
   const xs = polar.alpha;
-  let cell = polar.bucket[
-    Math.max(0, Math.min(BUCKETS, Math.floor(((alpha + Math.PI) * BUCKETS) / TURN)))
-  ] as number;
+  let slice = ((alpha + Math.PI) * (BUCKETS / TURN)) | 0;
+  if (slice < 0) slice = 0;
+  else if (slice > BUCKETS) slice = BUCKETS;
+  let cell = polar.bucket[slice] as number;
   const top = xs.length - 2;
   while (cell < top && (xs[cell + 1] as number) <= alpha) cell += 1;
   while (cell > 0 && (xs[cell] as number) > alpha) cell -= 1;
   const x0 = xs[cell] as number;
-  const width = (xs[cell + 1] as number) - x0;
-  const t = (alpha - x0) / width;
+  const x1 = xs[cell + 1] as number;
+  const inverse = 1 / (x1 - x0);
+  const t = (alpha - x0) * inverse;
   const l0 = polar.cl[cell] as number;
   const l1 = polar.cl[cell + 1] as number;
   const d0 = polar.cd[cell] as number;
   const d1 = polar.cd[cell + 1] as number;
+  out[PIECE_FROM] = x0 + turn;
+  out[PIECE_TO] = x1 + turn;
   if (polar.clSlope === null || polar.cdSlope === null) {
-    out[0] = l0 + t * (l1 - l0);
-    out[1] = d0 + t * (d1 - d0);
+    out[LIFT] = l0 + t * (l1 - l0);
+    out[DRAG] = d0 + t * (d1 - d0);
+    out[LIFT_SLOPE] = (l1 - l0) * inverse;
+    out[DRAG_SLOPE] = (d1 - d0) * inverse;
     return;
   }
-  const u = 1 - t;
-  const h00 = (1 + 2 * t) * u * u;
-  const h10 = t * u * u * width;
-  const h01 = t * t * (3 - 2 * t);
-  const h11 = -t * t * u * width;
-  out[0] =
-    h00 * l0 + h10 * (polar.clSlope[cell] as number) + h01 * l1 + h11 * (polar.clSlope[cell + 1] as number);
-  out[1] =
-    h00 * d0 + h10 * (polar.cdSlope[cell] as number) + h01 * d1 + h11 * (polar.cdSlope[cell + 1] as number);
+  const width = x1 - x0;
+  hermite(out, LIFT, t, width, l0, l1, polar.clSlope[cell] as number, polar.clSlope[cell + 1] as number);
+  hermite(out, DRAG, t, width, d0, d1, polar.cdSlope[cell] as number, polar.cdSlope[cell + 1] as number);
+}
+
+/** Value of the cubic into out[at], its slope two places on. */
+function hermite(
+  out: Float64Array,
+  at: number,
+  t: number,
+  width: number,
+  y0: number,
+  y1: number,
+  slope0: number,
+  slope1: number,
+): void {
+  const m0 = slope0 * width;
+  const m1 = slope1 * width;
+  const square = 3 * (y1 - y0) - 2 * m0 - m1;
+  const cube = m0 + m1 - 2 * (y1 - y0);
+  out[at] = y0 + t * (m0 + t * (square + t * cube));
+  out[at + 2] = (m0 + t * (2 * square + 3 * t * cube)) / width;
 }

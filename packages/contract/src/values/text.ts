@@ -50,13 +50,20 @@ export const emailAddress = z
   .max(254, 'E-mail is too long; allowed: at most 254 characters')
   .pipe(z.email('E-mail is not an address; allowed: an address such as name@example.org'));
 
+/** Length in UTF-8, which is what bcrypt counts. */
+function bytesOf(text: string): number {
+  let bytes = 0;
+  for (const mark of text) {
+    const code = mark.codePointAt(0) ?? 0;
+    bytes += code < 0x80 ? 1 : code < 0x800 ? 2 : code < 0x10000 ? 3 : 4;
+  }
+  return bytes;
+}
+
 export const newPassword = z
   .string({ error: 'Password is missing; allowed: 12 to 72 bytes' })
   .min(12, 'Password is too short; allowed: at least 12 characters')
-  .refine(
-    (text) => new TextEncoder().encode(text).length <= 72,
-    'Password is too long; allowed: at most 72 bytes',
-  );
+  .refine((text) => bytesOf(text) <= 72, 'Password is too long; allowed: at most 72 bytes');
 
 export const timestamp = z.iso.datetime({ offset: true });
 export const sha256 = z.string().regex(/^[0-9a-f]{64}$/u, 'allowed: 64 hexadecimal digits');

@@ -36,7 +36,11 @@ export async function buildAll() {
     existsSync(join(ROOT, 'apps/web/dist/index.html')) && existsSync(join(ROOT, 'apps/api/dist/server.js'));
   if (have && existsSync(stampFile) && readFileSync(stampFile, 'utf8') === wanted) return;
   console.log('Building …');
-  await mustRun('npx', [...PNPM, '-r', '--workspace-concurrency=2', 'run', 'build'], { cwd: ROOT });
+  await mustRun(
+    'npx',
+    [...PNPM, '-r', '--reporter=append-only', '--workspace-concurrency=2', 'run', 'build'],
+    { cwd: ROOT },
+  );
   mkdirSync(LOCAL, { recursive: true });
   writeFileSync(stampFile, wanted);
 }

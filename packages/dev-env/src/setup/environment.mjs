@@ -7,6 +7,7 @@ export function serverEnvironment({ port, mailPort, database, secret, mode }) {
     ...process.env,
     NODE_ENV: mode === 'test' ? 'test' : 'production',
     TIPWARD_MODE: mode,
+    TIPWARD_LOG_LEVEL: process.env.TIPWARD_LOG_LEVEL ?? 'warn',
     TIPWARD_PORT: String(port),
     TIPWARD_PUBLIC_URL: `http://127.0.0.1:${port}`,
     TIPWARD_SECRET: secret,
