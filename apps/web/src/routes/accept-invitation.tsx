@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { AcceptInvitationPage as Component } from '../features/entry/components/accept-invitation-page.tsx';

@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { AccountPage as Component } from '../features/account/components/account-page.tsx';

@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { AuditPage as Component } from '../features/audit/components/audit-page.tsx';

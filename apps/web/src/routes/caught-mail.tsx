@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { CaughtMailPage as Component } from '../features/mail/components/caught-mail-page.tsx';

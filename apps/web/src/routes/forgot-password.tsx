@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { ForgotPasswordPage as Component } from '../features/entry/components/forgot-password-page.tsx';

@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { PeoplePage as Component } from '../features/people/components/people-page.tsx';

@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { ResetPasswordPage as Component } from '../features/entry/components/reset-password-page.tsx';

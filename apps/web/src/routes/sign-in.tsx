@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { SignInPage as Component } from '../features/entry/components/sign-in-page.tsx';
