@@ -2,6 +2,7 @@ import type PgBoss from 'pg-boss';
 import type { Context } from '../context.ts';
 import { forgetOldKeys } from '../http/idempotency.ts';
 import { createPostman, type Postman } from '../mail/postman.ts';
+import { forgetOldSessions } from '../services/auth/forget-old-sessions.ts';
 import { createBoss, enqueue } from './create-boss.ts';
 import { sendMailJob } from './definitions/send-mail.ts';
 import { sendMail } from './handlers/send-mail.ts';
@@ -30,7 +31,10 @@ export async function startWorker(context: Context): Promise<RunningWorker> {
   const report = (what: string) => (error: unknown) => {
     context.log.error({ err: error }, what);
   };
-  const loops = [every(SWEEP_EVERY_MS, forgetOldKeys, report('old request keys were not swept'))];
+  const loops = [
+    every(SWEEP_EVERY_MS, forgetOldKeys, report('old request keys were not swept')),
+    every(SWEEP_EVERY_MS, forgetOldSessions, report('old sessions were not swept')),
+  ];
   if (postman === null) context.log.warn('no SMTP_URL: mail waits in the outbox');
   else {
     await workOnMail(context, boss, postman);

@@ -15,10 +15,10 @@ it('knows the right password from a wrong one and from none', async () => {
   expect(await passwordMatches(at(4), `${full}y`, await hashPassword(at(4), full))).toBe(false);
 });
 
-it.each([4, 6, 12])(
+it.each([4, 6])(
   'does the same work at cost %i where there is no hash, and makes none first',
   async (cost) => {
-    const compare = vi.spyOn(bcrypt, 'compare').mockImplementation(() => Promise.resolve(false));
+    const compare = vi.spyOn(bcrypt, 'compare');
     const hash = vi.spyOn(bcrypt, 'hash');
     try {
       await passwordMatches(at(cost), 'a wrong password', null);

@@ -13,14 +13,12 @@ export async function gatherDrafts(
   const options = transaction === undefined ? {} : { transaction };
   const drafts = await Draft.findAll({ where, order: [['updatedAt', 'DESC']], ...options });
   if (drafts.length === 0) return [];
-  const [designs, parents] = await Promise.all([
-    Design.findAll({ where: { id: drafts.map((draft) => draft.designId) }, ...options }),
-    Version.findAll({
-      where: { id: drafts.flatMap((draft) => draft.parentVersionId ?? []) },
-      attributes: ['id', 'number'],
-      ...options,
-    }),
-  ]);
+  const designs = await Design.findAll({ where: { id: drafts.map((draft) => draft.designId) }, ...options });
+  const parents = await Version.findAll({
+    where: { id: drafts.flatMap((draft) => draft.parentVersionId ?? []) },
+    attributes: ['id', 'number'],
+    ...options,
+  });
   const programmes = await Programme.findAll({
     where: { id: designs.map((design) => design.programmeId) },
     ...options,

@@ -1,10 +1,10 @@
 import type { Review as ReviewView } from '@tipward/contract';
 import type { Context } from '../../context.ts';
 import { inTransaction } from '../../db/in-transaction.ts';
+import { queueUp } from '../../db/queue-up.ts';
 import { conflict, forbidden } from '../../http/app-error.ts';
 import { reviewAskedLetter } from '../../mail/templates/review-asked.ts';
 import { Review } from '../../models/review.ts';
-import { Version } from '../../models/version.ts';
 import type { Actor } from '../../policies/actor.ts';
 import { canAskForReview } from '../../policies/versions.ts';
 import { versionLabel } from '../../presenters/version.ts';
@@ -26,8 +26,8 @@ export async function askForReview(
     throw forbidden('Only the author of a version asks for its review.');
   const leads = await addressesOf(seen.programmeId, ['lead'], actor.personId);
   const reviewId = await inTransaction(context, async (transaction) => {
-    // The version's row is locked so that two requests cannot both open a review.
-    await Version.findByPk(versionId, { transaction, lock: transaction.LOCK.UPDATE });
+    // Two requests at once cannot both open a review.
+    await queueUp(context.db, transaction, `version ${versionId}`);
     const { state } = (await findVersion(actor, versionId, transaction)).state;
     if (!canAskForReview(actor, { programmeId: seen.programmeId, authorId: seen.version.authorId, state }))
       throw conflict(

@@ -2,10 +2,10 @@ import type { BodyOf, Review as ReviewView, decideReview as operation } from '@t
 import { UniqueConstraintError } from 'sequelize';
 import type { Context } from '../../context.ts';
 import { inTransaction } from '../../db/in-transaction.ts';
+import { queueUp } from '../../db/queue-up.ts';
 import { conflict, forbidden } from '../../http/app-error.ts';
 import { reviewDecidedLetter } from '../../mail/templates/review-decided.ts';
 import { Decision } from '../../models/decision.ts';
-import { Version } from '../../models/version.ts';
 import type { Actor } from '../../policies/actor.ts';
 import { whyNotDecide } from '../../policies/reviews.ts';
 import type { ReviewParts } from '../../presenters/review.ts';
@@ -38,7 +38,7 @@ async function write(
 ): Promise<void> {
   const { outcome, note, contentHash, specificationHash } = given;
   await inTransaction(context, async (transaction) => {
-    await Version.findByPk(parts.version.id, { transaction, lock: transaction.LOCK.UPDATE });
+    await queueUp(context.db, transaction, `version ${parts.version.id}`);
     const decision = await Decision.create(
       {
         reviewId: parts.review.id,

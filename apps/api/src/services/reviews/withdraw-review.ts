@@ -2,9 +2,9 @@ import type { Review as ReviewView } from '@tipward/contract';
 import { UniqueConstraintError } from 'sequelize';
 import type { Context } from '../../context.ts';
 import { inTransaction } from '../../db/in-transaction.ts';
+import { queueUp } from '../../db/queue-up.ts';
 import { conflict, forbidden } from '../../http/app-error.ts';
 import { ReviewWithdrawal } from '../../models/review-withdrawal.ts';
-import { Version } from '../../models/version.ts';
 import type { Actor } from '../../policies/actor.ts';
 import { canWithdraw } from '../../policies/reviews.ts';
 import { writeAudit } from '../audit/write-audit.ts';
@@ -18,7 +18,7 @@ export async function withdrawReview(context: Context, actor: Actor, reviewId: s
     throw forbidden('Only the author takes a version back out of review.');
   try {
     await inTransaction(context, async (transaction) => {
-      await Version.findByPk(parts.version.id, { transaction, lock: transaction.LOCK.UPDATE });
+      await queueUp(context.db, transaction, `version ${parts.version.id}`);
       await ReviewWithdrawal.create({ reviewId, withdrawnBy: actor.personId }, { transaction });
       await writeAudit(context, transaction, {
         actorId: actor.personId,

@@ -30,16 +30,25 @@ export async function gatherVersions(
   });
   if (versions.length === 0) return [];
   const parentIds = versions.flatMap((version) => version.parentId ?? []);
-  const [states, evaluations, designs, parents, ref] = await Promise.all([
-    VersionState.findAll({ where: { versionId: versions.map((version) => version.id) }, ...options }),
-    EvaluationRecord.findAll({
-      where: { contentHash: { [Op.in]: versions.map((version) => version.contentHash) } },
-      ...options,
-    }),
-    Design.findAll({ where: { id: versions.map((version) => version.designId) }, ...options }),
-    Version.findAll({ where: { id: parentIds }, attributes: ['id', 'number'], ...options }),
-    loadPersonRefs(versions.map((version) => version.authorId)),
-  ]);
+  // One after the other: a transaction has one connection.
+  const states = await VersionState.findAll({
+    where: { versionId: versions.map((version) => version.id) },
+    ...options,
+  });
+  const evaluations = await EvaluationRecord.findAll({
+    where: { contentHash: { [Op.in]: versions.map((version) => version.contentHash) } },
+    ...options,
+  });
+  const designs = await Design.findAll({
+    where: { id: versions.map((version) => version.designId) },
+    ...options,
+  });
+  const parents = await Version.findAll({
+    where: { id: parentIds },
+    attributes: ['id', 'number'],
+    ...options,
+  });
+  const ref = await loadPersonRefs(versions.map((version) => version.authorId));
   const programmes = await Programme.findAll({
     where: { id: designs.map((design) => design.programmeId) },
     ...options,
