@@ -1,3 +1,7 @@
+import { useParams } from 'react-router-dom';
+import { OpenStudio } from '../features/studio/components/open-studio.tsx';
+
 export function Component() {
-  return null;
+  const { draftId = '' } = useParams();
+  return <OpenStudio key={draftId} draftId={draftId} />;
 }

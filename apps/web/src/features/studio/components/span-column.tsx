@@ -1,7 +1,7 @@
 import type { DesignContent, Specification } from '@tipward/contract';
-import { bladeSurface } from '@tipward/design-model';
 import type { AirfoilData, BladeSurface, LiveResult } from '@tipward/design-model';
 import { useMemo, useState } from 'react';
+import type { ReactNode } from 'react';
 import type { PlotLimit } from '../../../components/plots/plot-series.ts';
 import { SpanAxis } from '../../../components/plots/span-axis.tsx';
 import { SpanPlot } from '../../../components/plots/span-plot.tsx';
@@ -14,6 +14,7 @@ import { CHORD, SPAN_QUANTITIES, TWIST } from '../lib/span-quantities.ts';
 import type { SpanQuantity } from '../lib/span-quantities.ts';
 import type { DrawnReference } from '../lib/studio-series.ts';
 import { spanSeries } from '../lib/studio-series.ts';
+import { surfaceOf } from '../lib/surface-of.ts';
 import { Pending } from './pending.tsx';
 
 export interface SpanColumnProps {
@@ -26,15 +27,6 @@ export interface SpanColumnProps {
   readonly referenceSurface: BladeSurface | null;
   readonly limits: { readonly chord: readonly PlotLimit[] };
   readonly cursors: CursorStore;
-}
-
-/** The lofted blade, or null where there is nothing to loft. */
-export function surfaceOf(
-  content: DesignContent | null,
-  airfoils: readonly AirfoilData[] | null,
-): BladeSurface | null {
-  if (content === null || airfoils === null || airfoils.length === 0) return null;
-  return bladeSurface(content, airfoils);
 }
 
 const NO_LIMITS: readonly PlotLimit[] = [];
@@ -52,7 +44,7 @@ function Plot({
   cursors: CursorStore;
   stations?: readonly (readonly [number, number])[] | undefined;
   limits?: readonly PlotLimit[] | undefined;
-  choice?: React.ReactNode;
+  choice?: ReactNode;
 }) {
   const { live, reference, cursors } = props;
   const cursorRadiusM = useCursor(cursors, (held) => held.radiusM);

@@ -155,7 +155,8 @@ export function useStationGrid(
     focusGrid();
   };
   const onEditKeyDown = (event: KeyboardEvent<HTMLElement>) => {
-    event.stopPropagation();
+    // Undo in an open cell is the text's own; saving is the studio's everywhere.
+    if (!(event.ctrlKey || event.metaKey) || event.key.toLowerCase() !== 's') event.stopPropagation();
     if (edit === null || event.nativeEvent.isComposing) return;
     const vertical = { ArrowUp: -1, ArrowDown: 1 }[event.key];
     if (event.key === 'Escape') {

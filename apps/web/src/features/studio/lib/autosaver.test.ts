@@ -1,5 +1,5 @@
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
-import type { Draft, DraftContent } from '@tipward/contract';
+import type { DraftContent } from '@tipward/contract';
 import { ApiProblem, unreachable } from '../../../lib/api/api-problem.ts';
 import { sampleDraft } from '../test/sample-draft.ts';
 import { Autosaver } from './autosaver.ts';
@@ -114,6 +114,25 @@ describe('Autosaver', () => {
     await vi.advanceTimersByTimeAsync(60_000);
     expect(saver.getState()).toEqual({ kind: 'refused', message: 'Draft not found', keptHere: true });
     expect(save).toHaveBeenCalledTimes(1);
+  });
+});
+
+describe('saving at once', () => {
+  it('sends one request when it is asked twice while another runs', async () => {
+    const answers: ((value: { etag: string }) => void)[] = [];
+    const save = vi.fn(() => new Promise<{ etag: string }>((resolve) => answers.push(resolve)));
+    const { saver } = saverOf(save);
+    saver.edit(theirs);
+    await vi.advanceTimersByTimeAsync(800);
+    saver.edit(mine);
+    const both = [saver.flush(), saver.flush()];
+    answers[0]?.({ etag: '"4"' });
+    await vi.advanceTimersByTimeAsync(0);
+    expect(save).toHaveBeenCalledTimes(2);
+    answers[1]?.({ etag: '"5"' });
+    await Promise.all(both);
+    expect(save).toHaveBeenCalledTimes(2);
+    expect(saver.currentETag()).toBe('"5"');
   });
 });
 

@@ -69,14 +69,14 @@ export class Autosaver {
   /** Saves what is unsaved now. Resolves when it is stored, or when it is known why not (see the state). */
   async flush(): Promise<void> {
     this.unschedule();
-    await this.saving;
+    // Two that wait for the same save must not both start the next.
+    while (this.saving !== null) await this.saving;
     if (this.unsaved === null || this.state.kind === 'conflict') return;
     this.saving = this.saveOnce().finally(() => {
       this.saving = null;
     });
     await this.saving;
-    if (this.unsaved !== null && this.getState().kind === 'waiting')
-      this.schedule(this.settings.debounceMs ?? DEBOUNCE_MS);
+    if (this.getState().kind === 'waiting') this.schedule(this.settings.debounceMs ?? DEBOUNCE_MS);
   }
 
   /** Ends a conflict. 'mine' is saved over the stored draft; with 'theirs' the caller takes the stored content up. */
