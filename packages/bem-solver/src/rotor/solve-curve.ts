@@ -1,35 +1,47 @@
 import { SolverInputError, requireNumber } from '../input-error.ts';
 import { brentMaximum } from '../numerics/maximum.ts';
-import { emptyState } from '../section/solve-section.ts';
+import { newSectionSolver } from '../section/section-solver.ts';
 import type { Rotor } from './rotor.ts';
-import { solveUnit } from './solve-point.ts';
+import type { PointStatus } from './solve-point.ts';
+import type { UnitLoads } from './unit-loads.ts';
+import { addLoads, newLoads, takeElement, unitLoads } from './unit-loads.ts';
 
-/** Coefficients of a curve; NaN marks a point some section of which has no solution. */
+/** Coefficients of a curve; NaN, and the status, mark a point some section of which has no solution. */
 export interface CurveResult {
   readonly cp: Float64Array;
   readonly ct: Float64Array;
   readonly cq: Float64Array;
+  readonly statuses: readonly PointStatus[];
 }
 
-/** CP, CT and CQ at each tip-speed ratio (≥ 0) for one pitch; each point is the same as solvePoint's. */
+const solver = newSectionSolver();
+
+/**
+ * CP, CT and CQ at each tip-speed ratio (≥ 0) for one pitch (°); each point is the same as solvePoint's. Each element's
+ * balance is tabulated once and serves every ratio.
+ */
 export function solveCurve(
   rotor: Rotor,
   { pitchDeg, tipSpeedRatios }: { pitchDeg: number; tipSpeedRatios: ArrayLike<number> },
 ): CurveResult {
   requireNumber('pitchDeg', pitchDeg, -360, 360);
-  const n = tipSpeedRatios.length;
-  const result = { cp: new Float64Array(n), ct: new Float64Array(n), cq: new Float64Array(n) };
-  const area = Math.PI * rotor.tipRadiusM ** 2;
-  const scratch = emptyState();
-  for (let i = 0; i < n; i += 1) {
-    const lambda = requireNumber(`tipSpeedRatios[${i}]`, tipSpeedRatios[i] ?? NaN, 0);
-    const loads = solveUnit(rotor, lambda, pitchDeg, scratch);
-    const cq = loads.torque / (area * rotor.tipRadiusM);
-    result.cq[i] = cq;
-    result.cp[i] = cq * lambda;
-    result.ct[i] = loads.thrust / area;
+  const ratios = Float64Array.from(tipSpeedRatios);
+  ratios.forEach((lambda, i) => requireNumber(`tipSpeedRatios[${i}]`, lambda, 0));
+  const sums = Array.from(ratios, newLoads);
+  const pitch = (pitchDeg * Math.PI) / 180;
+  for (const element of rotor.elements) {
+    if (!takeElement(rotor, element, pitch, solver)) continue;
+    for (let i = 0; i < sums.length; i += 1)
+      addLoads(rotor, element, solver, ratios[i] as number, sums[i] as UnitLoads);
   }
-  return result;
+  const area = Math.PI * rotor.tipRadiusM ** 2;
+  const cq = Float64Array.from(sums, (loads) => loads.torque / (area * rotor.tipRadiusM));
+  return {
+    cp: cq.map((value, i) => value * (ratios[i] ?? NaN)),
+    ct: Float64Array.from(sums, (loads) => loads.thrust / area),
+    cq,
+    statuses: sums.map((loads) => (Number.isNaN(loads.torque) ? 'sections-unsolved' : 'converged')),
+  };
 }
 
 const COARSE = 24;
@@ -46,10 +58,9 @@ export function maximumCp(
   if (!(lambdaMax > lambdaMin))
     throw new SolverInputError('lambdaMax', lambdaMax, `above lambdaMin, ${lambdaMin}`);
   const at = (i: number) => lambdaMin + ((lambdaMax - lambdaMin) * i) / COARSE;
-  const scratch = emptyState();
   const area = Math.PI * rotor.tipRadiusM ** 2;
   const cpAt = (lambda: number) => {
-    const cp = (solveUnit(rotor, lambda, pitchDeg, scratch).torque * lambda) / (area * rotor.tipRadiusM);
+    const cp = (unitLoads(rotor, lambda, pitchDeg, solver).torque * lambda) / (area * rotor.tipRadiusM);
     return Number.isFinite(cp) ? cp : -Infinity;
   };
   let best = 0;
@@ -66,6 +77,6 @@ export function maximumCp(
   return {
     tipSpeedRatio: top.x,
     cp: top.value,
-    ct: solveUnit(rotor, top.x, pitchDeg, scratch).thrust / area,
+    ct: unitLoads(rotor, top.x, pitchDeg, solver).thrust / area,
   };
 }

@@ -1,7 +1,9 @@
 import { requireNumber } from '../input-error.ts';
+import { newSectionSolver } from '../section/section-solver.ts';
 import type { SectionState, SectionStatus } from '../section/solve-section.ts';
-import { emptyState, solveSection } from '../section/solve-section.ts';
+import { emptyState, solveState } from '../section/solve-section.ts';
 import type { Rotor, RotorElement } from './rotor.ts';
+import { addLoads, newLoads, takeElement } from './unit-loads.ts';
 
 export interface OperatingState {
   readonly windSpeedMS: number;
@@ -48,52 +50,8 @@ export interface PointResult {
   readonly sections?: readonly SectionResult[];
 }
 
-/** Loads over ½ρV²: thrust and torque of the rotor, root moments of a blade. NaN where a section has no solution. */
-export interface UnitLoads {
-  thrust: number;
-  torque: number;
-  flap: number;
-  edge: number;
-}
-
 const DEG = 180 / Math.PI;
-
-/** Solves every element at a tip-speed ratio and adds its load; `visit` sees each state, which is reused. */
-export function solveUnit(
-  rotor: Rotor,
-  tipSpeedRatio: number,
-  pitchDeg: number,
-  scratch: SectionState,
-  visit?: (element: RotorElement, state: SectionState, index: number) => void,
-): UnitLoads {
-  const pitch = pitchDeg / DEG;
-  let thrust = 0;
-  let torque = 0;
-  let flap = 0;
-  let edge = 0;
-  for (let i = 0; i < rotor.elements.length; i += 1) {
-    const element = rotor.elements[i] as RotorElement;
-    const state = solveSection(
-      {
-        solidity: element.solidity,
-        localSpeedRatio: (tipSpeedRatio * element.radiusM) / rotor.tipRadiusM,
-        pitchRad: element.twistRad + pitch,
-        polar: element.polar,
-        loss: element.loss,
-      },
-      rotor.options,
-      scratch,
-    );
-    const pressure = state.speedSquared * element.chordM * element.widthM;
-    const arm = element.radiusM - rotor.hubRadiusM;
-    thrust += pressure * state.cn;
-    torque += pressure * state.ct * element.radiusM;
-    flap += pressure * state.cn * arm;
-    edge += pressure * state.ct * arm;
-    visit?.(element, state, i);
-  }
-  return { thrust: thrust * rotor.bladeCount, torque: torque * rotor.bladeCount, flap, edge };
-}
+const solver = newSectionSolver();
 
 const orNull = (value: number) => (Number.isFinite(value) ? value : null);
 
@@ -144,9 +102,14 @@ export function solvePoint(
   const tipSpeedRatio = (omega * rotor.tipRadiusM) / wind;
   const failedStations: number[] = [];
   const rows: SectionResult[] = [];
-  const loads = solveUnit(rotor, tipSpeedRatio, point.pitchDeg, emptyState(), (element, state, index) => {
-    if (state.status === 'no-solution') failedStations.push(index);
-    if (sections) rows.push(sectionResult(rotor, element, state, wind));
+  const loads = newLoads();
+  rotor.elements.forEach((element, index) => {
+    const loaded = takeElement(rotor, element, point.pitchDeg / DEG, solver);
+    if (loaded && !addLoads(rotor, element, solver, tipSpeedRatio, loads)) failedStations.push(index);
+    if (!sections) return;
+    const state = emptyState();
+    if (loaded) solveState(solver, (tipSpeedRatio * element.radiusM) / rotor.tipRadiusM, state);
+    rows.push(sectionResult(rotor, element, state, wind));
   });
   const solved = failedStations.length === 0;
   const area = Math.PI * rotor.tipRadiusM ** 2;

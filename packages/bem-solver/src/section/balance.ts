@@ -1,26 +1,9 @@
 import type { Polar } from '../airfoil/polar.ts';
-import {
-  DRAG,
-  DRAG_SLOPE,
-  LIFT,
-  LIFT_SLOPE,
-  lookUp,
-  PIECE_FROM,
-  PIECE_TO,
-} from '../airfoil/polar.ts';
+import { DRAG, DRAG_SLOPE, LIFT, LIFT_SLOPE, lookUp, PIECE_FROM, PIECE_TO } from '../airfoil/polar.ts';
 import { inverseOneMinusA, switchKappa } from './high-induction.ts';
 import { factorAtRoot, factorSlopeAtRoot } from './loss.ts';
 import type { LossShape } from './loss.ts';
 import type { HighInduction, SolverOptions } from './options.ts';
-
-/** One blade element as its balance sees it; everything but the local speed ratio. */
-export interface BladeElement {
-  readonly solidity: number;
-  /** Twist plus pitch (rad), positive toward feather. */
-  readonly pitchRad: number;
-  readonly polar: Polar;
-  readonly loss: LossShape;
-}
 
 /** A blade element with what the balance takes from it and from the options at hand as plain numbers. */
 export interface Balance {
@@ -64,12 +47,19 @@ export function balanceRecord(): Float64Array {
   return new Float64Array(PLACES);
 }
 
-export function setBalance(balance: Balance, element: BladeElement, options: SolverOptions): void {
-  balance.polar = element.polar;
-  balance.sigma = element.solidity;
-  balance.pitch = element.pitchRad;
-  balance.tipRoot = Math.sqrt(element.loss.tip);
-  balance.hubRoot = Math.sqrt(element.loss.hub);
+export function setBalance(
+  balance: Balance,
+  polar: Polar,
+  solidity: number,
+  pitchRad: number,
+  loss: LossShape,
+  options: SolverOptions,
+): void {
+  balance.polar = polar;
+  balance.sigma = solidity;
+  balance.pitch = pitchRad;
+  balance.tipRoot = Math.sqrt(loss.tip);
+  balance.hubRoot = Math.sqrt(loss.hub);
   balance.dragShare = options.dragInInduction ? 1 : 0;
   balance.relation = options.highInduction;
   balance.switchKappa4 = 4 * switchKappa(options.highInduction);
@@ -122,8 +112,7 @@ export function balanceFrom(
     const tipU = balance.tipRoot * rootInverse;
     const hubU = balance.hubRoot * rootInverse;
     // du/dφ = −u·c/(2s)
-    dF =
-      (-0.5 * c * (hub * slopeTimes(tipU) + tip * slopeTimes(hubU))) / s;
+    dF = (-0.5 * c * (hub * slopeTimes(tipU) + tip * slopeTimes(hubU))) / s;
   }
   out[FACTOR] = F;
   out[FACTOR_SLOPE] = dF;
@@ -188,8 +177,7 @@ function highInduction(
     const kappa = (sigma * cn) / (4 * F * s * s);
     const inverse = inverseOneMinusA(balance.relation, kappa, F);
     const step = 1e-6;
-    const perKappa =
-      (inverseOneMinusA(balance.relation, kappa * (1 + step), F) - inverse) / (kappa * step);
+    const perKappa = (inverseOneMinusA(balance.relation, kappa * (1 + step), F) - inverse) / (kappa * step);
     const perF = (inverseOneMinusA(balance.relation, kappa, F * (1 + step)) - inverse) / (F * step);
     const dKappa = kappa * (dcn / cn - dF / F - (2 * c) / s);
     h = s * inverse;

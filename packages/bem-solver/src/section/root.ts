@@ -1,0 +1,97 @@
+import {
+  DENOMINATOR,
+  DENOMINATOR_SLOPE,
+  evaluateBalance,
+  NUMERATOR,
+  NUMERATOR_SLOPE,
+  PHI_FROM,
+  PHI_TO,
+} from './balance.ts';
+import type { Balance } from './balance.ts';
+import type { Branch } from './branch.ts';
+
+/**
+ * Newton's last step (rad) that is taken without looking again: the error left is of the order of its square. Only where
+ * the curve is smooth, i.e. with Buhl's relation and no row of the polar in between.
+ */
+const LAST_STEP = 2e-8;
+const MAX_STEPS = 120;
+
+/** A found root: φ, and the last step to it from where the record was evaluated. */
+export interface FoundRoot {
+  phi: number;
+  step: number;
+  converged: boolean;
+}
+
+/** Start in a cell: φ as a cubic of λr between the nodes where both slopes allow it, else the chord of the balance. */
+function startIn(branch: Branch, cell: number, lambda: number): number {
+  const x0 = branch.phi[cell] as number;
+  const width = (branch.phi[cell + 1] as number) - x0;
+  const D0 = branch.denominator[cell] as number;
+  const D1 = branch.denominator[cell + 1] as number;
+  if (D0 > 0 && D1 > 0) {
+    const l0 = branch.lambda[cell] as number;
+    const rise = (branch.lambda[cell + 1] as number) - l0;
+    const m0 = rise / (branch.slopeAfter[cell] as number);
+    const m1 = rise / (branch.slopeBefore[cell + 1] as number);
+    if (m0 > 0 && m1 > 0 && m0 < 4 * width && m1 < 4 * width) {
+      const t = (lambda - l0) / rise;
+      return x0 + t * (m0 + t * (3 * width - 2 * m0 - m1 + t * (m0 + m1 - 2 * width)));
+    }
+  }
+  const g0 = lambda * D0 - (branch.numerator[cell] as number);
+  const g1 = lambda * D1 - (branch.numerator[cell + 1] as number);
+  const share = g0 / (g0 - g1);
+  return x0 + width * (share > 0 && share < 1 ? share : 0.5);
+}
+
+/**
+ * The root of λr·D − N in a cell of the branch, by Newton's method kept inside the cell by bisection. Stops when the next
+ * step is below 2e-8 rad on a smooth piece (the step is then taken), or below the spacing of numbers.
+ */
+export function rootInCell(
+  balance: Balance,
+  branch: Branch,
+  cell: number,
+  lambda: number,
+  record: Float64Array,
+  found: FoundRoot,
+): void {
+  let low = branch.phi[cell] as number;
+  let high = branch.phi[cell + 1] as number;
+  const atLow = lambda * (branch.denominator[cell] as number) - (branch.numerator[cell] as number);
+  const lastStep = balance.relation === 'buhl' ? LAST_STEP : 0;
+  let phi = startIn(branch, cell, lambda);
+  if (!(phi >= low && phi <= high)) phi = 0.5 * (low + high);
+  for (let count = 0; count < MAX_STEPS; count += 1) {
+    evaluateBalance(balance, phi, record);
+    const g = lambda * (record[DENOMINATOR] as number) - (record[NUMERATOR] as number);
+    const step = -g / (lambda * (record[DENOMINATOR_SLOPE] as number) - (record[NUMERATOR_SLOPE] as number));
+    const next = phi + step;
+    // Convergence comes before the look at the bracket: rounding may put a converged step just outside.
+    if (
+      (Math.abs(step) <= lastStep &&
+        next >= (record[PHI_FROM] as number) &&
+        next <= (record[PHI_TO] as number)) ||
+      Math.abs(step) <= 4e-16 * (Math.abs(phi) + 1e-3)
+    ) {
+      found.phi = next;
+      found.step = step;
+      found.converged = true;
+      return;
+    }
+    if (g * atLow > 0) low = phi;
+    else high = phi;
+    if (high - low <= 4e-16 * Math.abs(phi) || g === 0) {
+      found.phi = phi;
+      found.step = 0;
+      found.converged = true;
+      return;
+    }
+    phi = next > low && next < high ? next : 0.5 * (low + high);
+  }
+  found.phi = phi;
+  found.step = 0;
+  found.converged = false;
+}
