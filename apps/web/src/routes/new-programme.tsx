@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { NewProgrammePage as Component } from '../features/programmes/components/specification/new-programme-page.tsx';

@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { ProgrammesPage as Component } from '../features/programmes/components/home/programmes-page.tsx';
