@@ -4,7 +4,7 @@ export const SOLVER = { name: 'tipward-bem', version: '0.1.0' } as const;
 export { SolverInputError } from './input-error.ts';
 export { blendPolars, interpolateReynolds } from './airfoil/blend.ts';
 export type { ReynoldsTable } from './airfoil/blend.ts';
-export { compilePolar, lookUp } from './airfoil/polar.ts';
+export { coefficientsAt, compilePolar } from './airfoil/polar.ts';
 export type { Polar, PolarInterpolation, PolarTable } from './airfoil/polar.ts';
 export { extendViterna, viternaAt, viternaConstants } from './airfoil/viterna.ts';
 export type { ViternaOptions } from './airfoil/viterna.ts';

@@ -97,17 +97,21 @@ export function compilePolar(
   return { ...columns, bucket, nodes: polarNodes(columns, closed === rows ? 0 : 1) };
 }
 
-/** Places in the record of a look-up. */
-export const LIFT = 0;
-export const DRAG = 1;
-export const LIFT_SLOPE = 2;
-export const DRAG_SLOPE = 3;
+/** Places in the record of a look-up, which also carries the angle in. */
+export const ANGLE = 0;
+export const LIFT = 1;
+export const DRAG = 2;
+export const LIFT_SLOPE = 3;
+export const DRAG_SLOPE = 4;
 /** Angles (rad) between which the coefficients are one smooth piece, in the turn of the angle asked for. */
-export const PIECE_FROM = 4;
-export const PIECE_TO = 5;
+export const PIECE_FROM = 5;
+export const PIECE_TO = 6;
+/** Places that a look-up uses. */
+export const LOOK_UP_PLACES = 7;
 
-/** Coefficients and their slopes (1/rad) at an angle of attack (rad, any turn), into `out` of 6 places. */
-export function lookUp(polar: Polar, angle: number, out: Float64Array): void {
+/** Coefficients and their slopes (1/rad) at the angle of attack record[ANGLE] (rad, any turn), into the record. */
+export function lookUp(polar: Polar, record: Float64Array): void {
+  const angle = record[ANGLE] as number;
   let turn = 0;
   if (angle > Math.PI || angle < -Math.PI) turn = TURN * Math.round(angle / TURN);
   const alpha = angle - turn;
@@ -121,41 +125,38 @@ export function lookUp(polar: Polar, angle: number, out: Float64Array): void {
   while (cell > 0 && (xs[cell] as number) > alpha) cell -= 1;
   const x0 = xs[cell] as number;
   const x1 = xs[cell + 1] as number;
+  record[PIECE_FROM] = x0 + turn;
+  record[PIECE_TO] = x1 + turn;
   const inverse = 1 / (x1 - x0);
+  const lift = polar.cl[cell] as number;
+  const drag = polar.cd[cell] as number;
+  const liftRise = (polar.cl[cell + 1] as number) - lift;
+  const dragRise = (polar.cd[cell + 1] as number) - drag;
   const t = (alpha - x0) * inverse;
-  const l0 = polar.cl[cell] as number;
-  const l1 = polar.cl[cell + 1] as number;
-  const d0 = polar.cd[cell] as number;
-  const d1 = polar.cd[cell + 1] as number;
-  out[PIECE_FROM] = x0 + turn;
-  out[PIECE_TO] = x1 + turn;
-  if (polar.clSlope === null || polar.cdSlope === null) {
-    out[LIFT] = l0 + t * (l1 - l0);
-    out[DRAG] = d0 + t * (d1 - d0);
-    out[LIFT_SLOPE] = (l1 - l0) * inverse;
-    out[DRAG_SLOPE] = (d1 - d0) * inverse;
-    return;
-  }
-  const width = x1 - x0;
-  hermite(out, LIFT, t, width, l0, l1, polar.clSlope[cell] as number, polar.clSlope[cell + 1] as number);
-  hermite(out, DRAG, t, width, d0, d1, polar.cdSlope[cell] as number, polar.cdSlope[cell + 1] as number);
+  record[LIFT] = lift + t * liftRise;
+  record[DRAG] = drag + t * dragRise;
+  record[LIFT_SLOPE] = liftRise * inverse;
+  record[DRAG_SLOPE] = dragRise * inverse;
+  if (polar.clSlope === null || polar.cdSlope === null) return;
+  bend(record, LIFT, polar.clSlope, cell, t);
+  bend(record, DRAG, polar.cdSlope, cell, t);
 }
 
-/** Value of the cubic into out[at], its slope two places on. */
-function hermite(
-  out: Float64Array,
-  at: number,
-  t: number,
-  width: number,
-  y0: number,
-  y1: number,
-  slope0: number,
-  slope1: number,
-): void {
-  const m0 = slope0 * width;
-  const m1 = slope1 * width;
-  const square = 3 * (y1 - y0) - 2 * m0 - m1;
-  const cube = m0 + m1 - 2 * (y1 - y0);
-  out[at] = y0 + t * (m0 + t * (square + t * cube));
-  out[at + 2] = (m0 + t * (2 * square + 3 * t * cube)) / width;
+/** Turns the chord at record[at] (its slope two places on) into the cubic of the slopes at both ends of the cell. */
+function bend(record: Float64Array, at: number, slopes: Float64Array, cell: number, t: number): void {
+  const chord = record[at + 2] as number;
+  const width = (record[PIECE_TO] as number) - (record[PIECE_FROM] as number);
+  const m0 = (slopes[cell] as number) - chord;
+  const m1 = (slopes[cell + 1] as number) - chord;
+  const u = 1 - t;
+  record[at] = (record[at] as number) + width * t * u * (u * m0 - t * m1);
+  record[at + 2] = chord + u * (1 - 3 * t) * m0 + t * (3 * t - 2) * m1;
+}
+
+/** Lift and drag coefficient at an angle of attack (rad, any turn). */
+export function coefficientsAt(polar: Polar, alphaRad: number): { cl: number; cd: number } {
+  const record = new Float64Array(LOOK_UP_PLACES);
+  record[ANGLE] = alphaRad;
+  lookUp(polar, record);
+  return { cl: record[LIFT] as number, cd: record[DRAG] as number };
 }

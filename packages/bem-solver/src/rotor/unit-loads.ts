@@ -9,6 +9,7 @@ import {
   FACTOR,
   FACTOR_SLOPE,
   SINE,
+  STEP,
 } from '../section/balance.ts';
 import type { SectionSolver } from '../section/section-solver.ts';
 import { findRoot, setElement } from '../section/section-solver.ts';
@@ -54,8 +55,8 @@ export function addLoads(
     loads.thrust = loads.torque = loads.flap = loads.edge = NaN;
     return false;
   }
-  const { record } = solver;
-  const step = solver.found.step;
+  const { record } = solver.balance;
+  const step = record[STEP] as number;
   const s = record[SINE] as number;
   const D = record[DENOMINATOR] as number;
   const F = record[FACTOR] as number;

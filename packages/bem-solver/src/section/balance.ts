@@ -1,50 +1,70 @@
 import type { Polar } from '../airfoil/polar.ts';
-import { DRAG, DRAG_SLOPE, LIFT, LIFT_SLOPE, lookUp, PIECE_FROM, PIECE_TO } from '../airfoil/polar.ts';
+import {
+  ANGLE,
+  DRAG,
+  DRAG_SLOPE,
+  LIFT,
+  LIFT_SLOPE,
+  LOOK_UP_PLACES,
+  lookUp,
+  PIECE_FROM,
+  PIECE_TO,
+} from '../airfoil/polar.ts';
+import { sineCosine } from '../numerics/sine-cosine.ts';
 import { inverseOneMinusA, switchKappa } from './high-induction.ts';
 import { factorAtRoot, factorSlopeAtRoot } from './loss.ts';
 import type { LossShape } from './loss.ts';
 import type { HighInduction, SolverOptions } from './options.ts';
 
-/** A blade element with what the balance takes from it and from the options at hand as plain numbers. */
+/**
+ * The balance of one blade element. All numbers, given and found, live in one record, at the places below, for in the
+ * innermost loop a number passed to or from a function may cost an allocation.
+ */
 export interface Balance {
   polar: Polar;
-  sigma: number;
-  pitch: number;
-  /** Square roots of the loss shape: √f = root/√|sin φ|. */
-  tipRoot: number;
-  hubRoot: number;
-  /** 1 where drag takes part in the inductions, else 0. */
-  dragShare: number;
   relation: HighInduction;
-  /** κ from which the high-induction relation holds, times 4. */
-  switchKappa4: number;
+  readonly record: Float64Array;
 }
 
-/** Places in the record of an evaluated balance. Slopes are per rad of φ. */
-export const NUMERATOR = 0;
-export const DENOMINATOR = 1;
-export const NUMERATOR_SLOPE = 2;
-export const DENOMINATOR_SLOPE = 3;
-/** How far the denominator moves with cn. */
-export const DENOMINATOR_PER_CN = 4;
-export const FACTOR = 5;
-export const FACTOR_SLOPE = 6;
+/** Inflow angle to evaluate at, its sine and cosine. */
+export const PHI = LOOK_UP_PLACES;
+export const SINE = PHI + 1;
+export const COSINE = PHI + 2;
+/** λr·D(φ) = N(φ); slopes are per rad of φ. */
+export const NUMERATOR = PHI + 3;
+export const DENOMINATOR = PHI + 4;
+export const NUMERATOR_SLOPE = PHI + 5;
+export const DENOMINATOR_SLOPE = PHI + 6;
+/** How far D moves with cn. */
+export const DENOMINATOR_PER_CN = PHI + 7;
+export const FACTOR = PHI + 8;
+export const FACTOR_SLOPE = PHI + 9;
 /** Coefficients of the loads, drag included whatever the options. */
-export const CN = 7;
-export const CT = 8;
-export const CN_SLOPE = 9;
-export const CT_SLOPE = 10;
-export const CL = 11;
-export const CD = 12;
+export const CN = PHI + 10;
+export const CT = PHI + 11;
+export const CN_SLOPE = PHI + 12;
+export const CT_SLOPE = PHI + 13;
 /** φ between which the balance is one smooth piece of the polar. */
-export const PHI_FROM = 13;
-export const PHI_TO = 14;
-export const SINE = 15;
-export const COSINE = 16;
-const PLACES = 17;
+export const PHI_FROM = PHI + 14;
+export const PHI_TO = PHI + 15;
+export const SIGMA = PHI + 16;
+/** Twist plus pitch (rad). */
+export const PITCH = PHI + 17;
+/** Square roots of the loss shape: √f = root/√|sin φ|. */
+export const TIP_ROOT = PHI + 18;
+export const HUB_ROOT = PHI + 19;
+/** 1 where drag takes part in the inductions, else 0. */
+export const DRAG_SHARE = PHI + 20;
+/** κ from which the high-induction relation holds, times 4. */
+export const SWITCH_KAPPA_4 = PHI + 21;
+/** Local speed ratio to solve for; the root found and Newton's last step to it from where the record was evaluated. */
+export const LAMBDA = PHI + 22;
+export const ROOT = PHI + 23;
+export const STEP = PHI + 24;
+const PLACES = PHI + 25;
 
-export function balanceRecord(): Float64Array {
-  return new Float64Array(PLACES);
+export function newBalance(polar: Polar): Balance {
+  return { polar, relation: 'buhl', record: new Float64Array(PLACES) };
 }
 
 export function setBalance(
@@ -55,136 +75,129 @@ export function setBalance(
   loss: LossShape,
   options: SolverOptions,
 ): void {
+  const { record } = balance;
   balance.polar = polar;
-  balance.sigma = solidity;
-  balance.pitch = pitchRad;
-  balance.tipRoot = Math.sqrt(loss.tip);
-  balance.hubRoot = Math.sqrt(loss.hub);
-  balance.dragShare = options.dragInInduction ? 1 : 0;
   balance.relation = options.highInduction;
-  balance.switchKappa4 = 4 * switchKappa(options.highInduction);
+  record[SIGMA] = solidity;
+  record[PITCH] = pitchRad;
+  record[TIP_ROOT] = Math.sqrt(loss.tip);
+  record[HUB_ROOT] = Math.sqrt(loss.hub);
+  record[DRAG_SHARE] = options.dragInInduction ? 1 : 0;
+  record[SWITCH_KAPPA_4] = 4 * switchKappa(options.highInduction);
 }
 
-const coefficients = new Float64Array(6);
+/** Evaluates the balance at record[PHI]. */
+export function evaluateBalance(balance: Balance): void {
+  const { record } = balance;
+  const pitch = record[PITCH] as number;
+  record[ANGLE] = (record[PHI] as number) - pitch;
+  lookUp(balance.polar, record);
+  record[PHI_FROM] = (record[PIECE_FROM] as number) + pitch;
+  record[PHI_TO] = (record[PIECE_TO] as number) + pitch;
+  sineCosine(record, PHI, SINE);
+  balanceForces(balance);
+}
 
-/** Evaluates the balance at an inflow angle. */
-export function evaluateBalance(balance: Balance, phi: number, out: Float64Array): void {
-  lookUp(balance.polar, phi - balance.pitch, coefficients);
-  out[PHI_FROM] = (coefficients[PIECE_FROM] as number) + balance.pitch;
-  out[PHI_TO] = (coefficients[PIECE_TO] as number) + balance.pitch;
-  balanceFrom(
-    balance,
-    Math.sin(phi),
-    Math.cos(phi),
-    coefficients[LIFT] as number,
-    coefficients[DRAG] as number,
-    coefficients[LIFT_SLOPE] as number,
-    coefficients[DRAG_SLOPE] as number,
-    out,
-  );
+/** Prandtl's factor and its slope in φ, from sine and cosine. */
+function takeLoss(record: Float64Array): void {
+  const s = record[SINE] as number;
+  const inverse = 1 / Math.sqrt(Math.abs(s));
+  const tipRoot = (record[TIP_ROOT] as number) * inverse;
+  const hubRoot = (record[HUB_ROOT] as number) * inverse;
+  const tip = factorAtRoot(tipRoot);
+  const hub = factorAtRoot(hubRoot);
+  let slope = 0;
+  // du/dφ = −u·c/(2s) for u = √f; a factor of 1 has no slope, and its u may be infinite.
+  if (tip < 1) slope += hub * tipRoot * factorSlopeAtRoot(tipRoot);
+  if (hub < 1) slope += tip * hubRoot * factorSlopeAtRoot(hubRoot);
+  record[FACTOR] = tip * hub;
+  record[FACTOR_SLOPE] = (-0.5 * slope * (record[COSINE] as number)) / s;
 }
 
 /**
  * The balance of momentum and blade-element forces as λr·D(φ) = N(φ): a rearrangement of Ning's residual (2014) without
- * poles that is linear in the local speed ratio. N = 4F|s|c − σ′ct; D = 4F|s|s + σ′cn by momentum theory (with |s|s = −s²
- * below the rotor plane), D = 4Fs·h in high induction, where h = sinφ/(1 − a). Everywhere D = 4F|s|h. A root is admissible,
- * the air passing the way φ says, where D > 0.
+ * poles that is linear in the local speed ratio. N = 4F|s|c − σ′ct; D = 4F|s|s + σ′cn by momentum theory, D = 4Fs·h in high
+ * induction, where h = sinφ/(1 − a). Everywhere D = 4F|s|h. A root is admissible, the air passing the way φ says, where
+ * D > 0. Takes sine, cosine, lift, drag and their slopes from the record.
  */
-export function balanceFrom(
-  balance: Balance,
-  s: number,
-  c: number,
-  cl: number,
-  cd: number,
-  clSlope: number,
-  cdSlope: number,
-  out: Float64Array,
-): void {
-  const { sigma, dragShare } = balance;
-  const side = s < 0 ? -1 : 1;
-  const mag = side * s;
-  const rootInverse = 1 / Math.sqrt(mag);
-  const tip = factorAtRoot(balance.tipRoot * rootInverse);
-  const hub = factorAtRoot(balance.hubRoot * rootInverse);
-  const F = tip * hub;
-  let dF = 0;
-  if (F < 1) {
-    const tipU = balance.tipRoot * rootInverse;
-    const hubU = balance.hubRoot * rootInverse;
-    // du/dφ = −u·c/(2s)
-    dF = (-0.5 * c * (hub * slopeTimes(tipU) + tip * slopeTimes(hubU))) / s;
+export function balanceForces(balance: Balance): void {
+  const { record } = balance;
+  takeLoss(record);
+  const F = record[FACTOR] as number;
+  const dF = record[FACTOR_SLOPE] as number;
+  const s = record[SINE] as number;
+  const c = record[COSINE] as number;
+  const cl = record[LIFT] as number;
+  const cd = record[DRAG] as number;
+  const clSlope = record[LIFT_SLOPE] as number;
+  const cdSlope = record[DRAG_SLOPE] as number;
+  const sigma = record[SIGMA] as number;
+  let cn = cl * c + cd * s;
+  let ct = cl * s - cd * c;
+  let dcn = clSlope * c + cdSlope * s - ct;
+  let dct = clSlope * s - cdSlope * c + cn;
+  record[CN] = cn;
+  record[CT] = ct;
+  record[CN_SLOPE] = dcn;
+  record[CT_SLOPE] = dct;
+  if (record[DRAG_SHARE] === 0) {
+    cn = cl * c;
+    ct = cl * s;
+    dcn = clSlope * c - ct;
+    dct = clSlope * s + cn;
   }
-  out[FACTOR] = F;
-  out[FACTOR_SLOPE] = dF;
-  const cn = cl * c + cd * s;
-  const ct = cl * s - cd * c;
-  const dcn = clSlope * c + cdSlope * s - ct;
-  const dct = clSlope * s - cdSlope * c + cn;
-  out[CL] = cl;
-  out[CD] = cd;
-  out[CN] = cn;
-  out[CT] = ct;
-  out[CN_SLOPE] = dcn;
-  out[CT_SLOPE] = dct;
-  out[SINE] = s;
-  out[COSINE] = c;
-  const without = dragShare - 1;
-  const cnI = cn + without * cd * s;
-  const ctI = ct - without * cd * c;
-  const dcnI = dcn + without * (cdSlope * s + cd * c);
-  const dctI = dct - without * (cdSlope * c - cd * s);
-  out[NUMERATOR] = 4 * F * mag * c - sigma * ctI;
-  out[NUMERATOR_SLOPE] = 4 * (dF * mag * c + F * side * (c * c - s * s)) - sigma * dctI;
-  if (s > 0 && sigma * cnI > balance.switchKappa4 * F * s * s) {
-    highInduction(balance, F, dF, s, c, cnI, dcnI, out);
+  const fourFs = 4 * F * Math.abs(s);
+  const slope = 4 * (dF * Math.abs(s) + (s < 0 ? -F : F) * c);
+  record[NUMERATOR] = fourFs * c - sigma * ct;
+  record[NUMERATOR_SLOPE] = slope * c - fourFs * s - sigma * dct;
+  if (s > 0 && sigma * cn > (record[SWITCH_KAPPA_4] as number) * F * s * s) {
+    if (balance.relation === 'buhl') buhl(record, sigma * cn, sigma * dcn);
+    else otherRelation(balance, cn, dcn);
     return;
   }
-  out[DENOMINATOR] = 4 * F * mag * s + sigma * cnI;
-  out[DENOMINATOR_SLOPE] = 4 * (dF * mag * s + 2 * F * mag * c) + sigma * dcnI;
-  out[DENOMINATOR_PER_CN] = sigma;
+  record[DENOMINATOR] = fourFs * s + sigma * cn;
+  record[DENOMINATOR_SLOPE] = slope * s + fourFs * c + sigma * dcn;
+  record[DENOMINATOR_PER_CN] = sigma;
 }
 
-function slopeTimes(u: number): number {
-  return u < 1e9 ? u * factorSlopeAtRoot(u) : 0;
+/** D from h = sinφ/(1 − a), its slope and its slope in cn. */
+function takeDenominator(record: Float64Array, h: number, dh: number, hPerCn: number): void {
+  const F = record[FACTOR] as number;
+  const s = record[SINE] as number;
+  const c = record[COSINE] as number;
+  record[DENOMINATOR] = 4 * F * s * h;
+  record[DENOMINATOR_SLOPE] = 4 * ((record[FACTOR_SLOPE] as number) * s * h + F * (c * h + s * dh));
+  record[DENOMINATOR_PER_CN] = 4 * F * s * hPerCn;
 }
 
-function highInduction(
-  balance: Balance,
-  F: number,
-  dF: number,
-  s: number,
-  c: number,
-  cn: number,
-  dcn: number,
-  out: Float64Array,
-): void {
-  const { sigma } = balance;
-  let h: number;
-  let dh: number;
-  let hPerCn: number;
-  if (balance.relation === 'buhl') {
-    // 1/(1 − a) = 5/3 − F + √(2Fκ − F(4/3 − F)): Buhl's relation (2005) solved, times sin φ; no pole at s = 0.
-    const q = 0.5 * sigma * cn - F * (4 / 3 - F) * s * s;
-    const root = Math.sqrt(q);
-    h = s * (5 / 3 - F) + root;
-    hPerCn = (0.25 * sigma) / root;
-    dh =
-      c * (5 / 3 - F) -
-      s * dF +
-      hPerCn * dcn -
-      (dF * (4 / 3 - 2 * F) * s * s + F * (4 / 3 - F) * 2 * s * c) / (2 * root);
-  } else {
-    const kappa = (sigma * cn) / (4 * F * s * s);
-    const inverse = inverseOneMinusA(balance.relation, kappa, F);
-    const step = 1e-6;
-    const perKappa = (inverseOneMinusA(balance.relation, kappa * (1 + step), F) - inverse) / (kappa * step);
-    const perF = (inverseOneMinusA(balance.relation, kappa, F * (1 + step)) - inverse) / (F * step);
-    const dKappa = kappa * (dcn / cn - dF / F - (2 * c) / s);
-    h = s * inverse;
-    hPerCn = (s * perKappa * kappa) / cn;
-    dh = c * inverse + s * (perKappa * dKappa + perF * dF);
-  }
-  out[DENOMINATOR] = 4 * F * s * h;
-  out[DENOMINATOR_SLOPE] = 4 * (dF * s * h + F * c * h + F * s * dh);
-  out[DENOMINATOR_PER_CN] = 4 * F * s * hPerCn;
+/** 1/(1 − a) = 5/3 − F + √(2Fκ − F(4/3 − F)): Buhl's relation (2005) solved; times sin φ it has no pole at φ = 0. */
+function buhl(record: Float64Array, load: number, dLoad: number): void {
+  const F = record[FACTOR] as number;
+  const dF = record[FACTOR_SLOPE] as number;
+  const s = record[SINE] as number;
+  const c = record[COSINE] as number;
+  const root = Math.sqrt(0.5 * load - F * (4 / 3 - F) * s * s);
+  const half = 0.5 / root;
+  const bend = dF * (4 / 3 - 2 * F) * s * s + F * (4 / 3 - F) * 2 * s * c;
+  const dh = c * (5 / 3 - F) - s * dF + half * (0.5 * dLoad - bend);
+  takeDenominator(record, s * (5 / 3 - F) + root, dh, half * 0.5 * (record[SIGMA] as number));
+}
+
+const RELATIVE_STEP = 1e-6;
+
+/** The other relations, with slopes by differences: they only steer Newton's method. */
+function otherRelation(balance: Balance, cn: number, dcn: number): void {
+  const { record, relation } = balance;
+  const F = record[FACTOR] as number;
+  const dF = record[FACTOR_SLOPE] as number;
+  const s = record[SINE] as number;
+  const c = record[COSINE] as number;
+  const kappa = ((record[SIGMA] as number) * cn) / (4 * F * s * s);
+  const inverse = inverseOneMinusA(relation, kappa, F);
+  const more = 1 + RELATIVE_STEP;
+  const perKappa = (inverseOneMinusA(relation, kappa * more, F) - inverse) / (kappa * RELATIVE_STEP);
+  const perF = (inverseOneMinusA(relation, kappa, F * more) - inverse) / (F * RELATIVE_STEP);
+  const dKappa = kappa * (dcn / cn - dF / F - (2 * c) / s);
+  const dh = c * inverse + s * (perKappa * dKappa + perF * dF);
+  takeDenominator(record, s * inverse, dh, (s * perKappa * kappa) / cn);
 }

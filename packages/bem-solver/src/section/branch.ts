@@ -1,13 +1,19 @@
 import type { PolarNodes } from '../airfoil/polar-nodes.ts';
+import { DRAG, DRAG_SLOPE, LIFT, LIFT_SLOPE } from '../airfoil/polar.ts';
 import {
-  balanceFrom,
-  balanceRecord,
+  balanceForces,
+  COSINE,
   DENOMINATOR,
   DENOMINATOR_PER_CN,
   DENOMINATOR_SLOPE,
+  DRAG_SHARE,
   evaluateBalance,
   NUMERATOR,
   NUMERATOR_SLOPE,
+  PHI,
+  PITCH,
+  SIGMA,
+  SINE,
 } from './balance.ts';
 import type { Balance } from './balance.ts';
 
@@ -65,26 +71,25 @@ function makeRoom(branch: Branch, nodes: number): void {
 const TURN = 2 * Math.PI;
 /** Nodes nearer than this to an end of the range are left out. */
 const END_GAP = 1e-9;
-const record = balanceRecord();
 
-/** Takes the record, which holds the balance at phi with the slopes to the right, as the node at `i`. */
-function take(branch: Branch, i: number, phi: number): number {
+/** Takes the balance as the record has it, with the slopes to the right, as the node at `i`. */
+function take(branch: Branch, i: number, record: Float64Array): void {
   const N = record[NUMERATOR] as number;
   const D = record[DENOMINATOR] as number;
   const lambda = N / D;
   const slope = ((record[NUMERATOR_SLOPE] as number) - lambda * (record[DENOMINATOR_SLOPE] as number)) / D;
-  branch.phi[i] = phi;
+  branch.phi[i] = record[PHI] as number;
   branch.numerator[i] = N;
   branch.denominator[i] = D;
   branch.lambda[i] = lambda;
   branch.slopeBefore[i] = slope;
   branch.slopeAfter[i] = slope;
-  return lambda;
 }
 
 function takePoint(balance: Balance, branch: Branch, i: number, phi: number): void {
-  evaluateBalance(balance, phi, record);
-  take(branch, i, phi);
+  balance.record[PHI] = phi;
+  evaluateBalance(balance);
+  take(branch, i, balance.record);
 }
 
 /** First of the ascending angles above `at`. */
@@ -99,39 +104,41 @@ function firstAbove(angles: Float64Array, at: number): number {
   return low;
 }
 
-/** A node of the polar as a node of the branch; the slope to its left differs where the polar has a kink there. */
-function takeNode(
-  balance: Balance,
-  branch: Branch,
-  i: number,
-  phi: number,
-  s: number,
-  c: number,
-  nodes: PolarNodes,
-  k: number,
-): void {
+/** A node of the polar as the branch's node at `i`; the slope to its left differs where the polar has a kink there. */
+function takeNode(balance: Balance, branch: Branch, i: number, nodes: PolarNodes, k: number): void {
+  const { record } = balance;
   const clSlope = nodes.clSlopeAfter[k] as number;
   const cdSlope = nodes.cdSlopeAfter[k] as number;
-  balanceFrom(balance, s, c, nodes.cl[k] as number, nodes.cd[k] as number, clSlope, cdSlope, record);
-  const lambda = take(branch, i, phi);
+  record[LIFT] = nodes.cl[k] as number;
+  record[DRAG] = nodes.cd[k] as number;
+  record[LIFT_SLOPE] = clSlope;
+  record[DRAG_SLOPE] = cdSlope;
+  balanceForces(balance);
+  take(branch, i, record);
   const liftKink = (nodes.clSlopeBefore[k] as number) - clSlope;
-  const dragKink = balance.dragShare * ((nodes.cdSlopeBefore[k] as number) - cdSlope);
+  const dragKink = (record[DRAG_SHARE] as number) * ((nodes.cdSlopeBefore[k] as number) - cdSlope);
+  const s = record[SINE] as number;
+  const c = record[COSINE] as number;
   const cnKink = liftKink * c + dragKink * s;
   const ctKink = liftKink * s - dragKink * c;
-  const change = -balance.sigma * ctKink - lambda * (record[DENOMINATOR_PER_CN] as number) * cnKink;
+  const lambda = branch.lambda[i] as number;
+  const change =
+    -(record[SIGMA] as number) * ctKink - lambda * (record[DENOMINATOR_PER_CN] as number) * cnKink;
   branch.slopeBefore[i] = (branch.slopeAfter[i] as number) + change / (record[DENOMINATOR] as number);
 }
 
 /** Tabulates the balance over [low, high], which must not hold φ = 0: at its ends and at every node of the polar between. */
 export function tabulate(balance: Balance, low: number, high: number, branch: Branch): void {
+  const { record } = balance;
   const { nodes } = balance.polar;
   const { alpha, sine, cosine } = nodes;
   makeRoom(branch, alpha.length + 2);
-  const sinPitch = Math.sin(balance.pitch);
-  const cosPitch = Math.cos(balance.pitch);
+  const pitch = record[PITCH] as number;
+  const sinPitch = Math.sin(pitch);
+  const cosPitch = Math.cos(pitch);
   takePoint(balance, branch, 0, low);
   let count = 1;
-  const start = low - balance.pitch;
+  const start = low - pitch;
   let turn = TURN * Math.floor((start - (alpha[0] as number)) / TURN);
   let k = firstAbove(alpha, start - turn + END_GAP);
   for (;;) {
@@ -139,13 +146,14 @@ export function tabulate(balance: Balance, low: number, high: number, branch: Br
       k = 0;
       turn += TURN;
     }
-    const phi = (alpha[k] as number) + turn + balance.pitch;
+    const phi = (alpha[k] as number) + turn + pitch;
     if (phi > high - END_GAP) break;
     const sa = sine[k] as number;
     const ca = cosine[k] as number;
-    const s = sa * cosPitch + ca * sinPitch;
-    const c = ca * cosPitch - sa * sinPitch;
-    takeNode(balance, branch, count, phi, s, c, nodes, k);
+    record[PHI] = phi;
+    record[SINE] = sa * cosPitch + ca * sinPitch;
+    record[COSINE] = ca * cosPitch - sa * sinPitch;
+    takeNode(balance, branch, count, nodes, k);
     count += 1;
     k += 1;
   }
@@ -179,7 +187,9 @@ const TURN_STEPS = 24;
 
 /** dλr/dφ times D² at φ: the sign tells where λr(φ) turns. */
 function slopeSign(balance: Balance, phi: number): number {
-  evaluateBalance(balance, phi, record);
+  const { record } = balance;
+  record[PHI] = phi;
+  evaluateBalance(balance);
   return (
     (record[NUMERATOR_SLOPE] as number) * (record[DENOMINATOR] as number) -
     (record[NUMERATOR] as number) * (record[DENOMINATOR_SLOPE] as number)

@@ -2,10 +2,14 @@ import {
   DENOMINATOR,
   DENOMINATOR_SLOPE,
   evaluateBalance,
+  LAMBDA,
   NUMERATOR,
   NUMERATOR_SLOPE,
+  PHI,
   PHI_FROM,
   PHI_TO,
+  ROOT,
+  STEP,
 } from './balance.ts';
 import type { Balance } from './balance.ts';
 import type { Branch } from './branch.ts';
@@ -16,13 +20,6 @@ import type { Branch } from './branch.ts';
  */
 const LAST_STEP = 2e-8;
 const MAX_STEPS = 120;
-
-/** A found root: φ, and the last step to it from where the record was evaluated. */
-export interface FoundRoot {
-  phi: number;
-  step: number;
-  converged: boolean;
-}
 
 /** Start in a cell: φ as a cubic of λr between the nodes where both slopes allow it, else the chord of the balance. */
 function startIn(branch: Branch, cell: number, lambda: number): number {
@@ -46,18 +43,21 @@ function startIn(branch: Branch, cell: number, lambda: number): number {
   return x0 + width * (share > 0 && share < 1 ? share : 0.5);
 }
 
+/** True: the root is `step` from where the record was evaluated. */
+function arrived(record: Float64Array, step: number): boolean {
+  record[ROOT] = (record[PHI] as number) + step;
+  record[STEP] = step;
+  return true;
+}
+
 /**
- * The root of λr·D − N in a cell of the branch, by Newton's method kept inside the cell by bisection. Stops when the next
- * step is below 2e-8 rad on a smooth piece (the step is then taken), or below the spacing of numbers.
+ * The root of λr·D − N at record[LAMBDA] in a cell of the branch, by Newton's method kept inside the cell by bisection. Stops
+ * when the next step is below 2e-8 rad on a smooth piece (the step is then taken), or below the spacing of numbers.
+ * @returns whether it converged; the root and the last step are in the record
  */
-export function rootInCell(
-  balance: Balance,
-  branch: Branch,
-  cell: number,
-  lambda: number,
-  record: Float64Array,
-  found: FoundRoot,
-): void {
+export function rootInCell(balance: Balance, branch: Branch, cell: number): boolean {
+  const { record } = balance;
+  const lambda = record[LAMBDA] as number;
   let low = branch.phi[cell] as number;
   let high = branch.phi[cell + 1] as number;
   const atLow = lambda * (branch.denominator[cell] as number) - (branch.numerator[cell] as number);
@@ -65,33 +65,20 @@ export function rootInCell(
   let phi = startIn(branch, cell, lambda);
   if (!(phi >= low && phi <= high)) phi = 0.5 * (low + high);
   for (let count = 0; count < MAX_STEPS; count += 1) {
-    evaluateBalance(balance, phi, record);
+    record[PHI] = phi;
+    evaluateBalance(balance);
     const g = lambda * (record[DENOMINATOR] as number) - (record[NUMERATOR] as number);
     const step = -g / (lambda * (record[DENOMINATOR_SLOPE] as number) - (record[NUMERATOR_SLOPE] as number));
     const next = phi + step;
+    const size = Math.abs(step);
     // Convergence comes before the look at the bracket: rounding may put a converged step just outside.
-    if (
-      (Math.abs(step) <= lastStep &&
-        next >= (record[PHI_FROM] as number) &&
-        next <= (record[PHI_TO] as number)) ||
-      Math.abs(step) <= 4e-16 * (Math.abs(phi) + 1e-3)
-    ) {
-      found.phi = next;
-      found.step = step;
-      found.converged = true;
-      return;
-    }
+    if (size <= lastStep && next >= (record[PHI_FROM] as number) && next <= (record[PHI_TO] as number))
+      return arrived(record, step);
+    if (size <= 4e-16 * (Math.abs(phi) + 1e-3)) return arrived(record, step);
     if (g * atLow > 0) low = phi;
     else high = phi;
-    if (high - low <= 4e-16 * Math.abs(phi) || g === 0) {
-      found.phi = phi;
-      found.step = 0;
-      found.converged = true;
-      return;
-    }
+    if (high - low <= 4e-16 * Math.abs(phi) || g === 0) return arrived(record, 0);
     phi = next > low && next < high ? next : 0.5 * (low + high);
   }
-  found.phi = phi;
-  found.step = 0;
-  found.converged = false;
+  return false;
 }

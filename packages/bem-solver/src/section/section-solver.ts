@@ -1,13 +1,20 @@
 import type { Balance } from './balance.ts';
-import { balanceRecord, DENOMINATOR, DENOMINATOR_SLOPE, setBalance } from './balance.ts';
+import {
+  DENOMINATOR,
+  DENOMINATOR_SLOPE,
+  LAMBDA,
+  newBalance,
+  PITCH,
+  ROOT,
+  setBalance,
+  STEP,
+} from './balance.ts';
 import type { Branch } from './branch.ts';
 import { newBranch, tabulate } from './branch.ts';
 import type { Polar } from '../airfoil/polar.ts';
 import { compilePolar } from '../airfoil/polar.ts';
 import type { LossShape } from './loss.ts';
 import type { SolverOptions } from './options.ts';
-import { DEFAULT_OPTIONS } from './options.ts';
-import type { FoundRoot } from './root.ts';
 import { rootInCell } from './root.ts';
 
 const EPSILON = 1e-6;
@@ -24,33 +31,17 @@ export interface SectionSolver {
   readonly below: Branch;
   /** (−π/2, −ε): looked at only when nothing else has a root. */
   readonly farBelow: Branch;
-  /** The balance where the found root was last evaluated. */
-  readonly record: Float64Array;
-  readonly found: FoundRoot;
   multipleRoots: boolean;
 }
 
 export function newSectionSolver(): SectionSolver {
   const polar = compilePolar({ alphaDeg: [-180, 180], cl: [0, 0], cd: [0, 0] });
-  const balance: Balance = {
-    polar,
-    sigma: 0.1,
-    pitch: 0.1,
-    tipRoot: 0.1,
-    hubRoot: 0.1,
-    dragShare: 1,
-    relation: 'buhl',
-    switchKappa4: 0.1,
-  };
-  setBalance(balance, polar, 0.1, 0.1, { tip: 1, hub: 1 }, DEFAULT_OPTIONS);
   return {
-    balance,
+    balance: newBalance(polar),
     ahead: newBranch(),
     behind: newBranch(),
     below: newBranch(),
     farBelow: newBranch(),
-    record: balanceRecord(),
-    found: { phi: NaN, step: 0, converged: false },
     multipleRoots: false,
   };
 }
@@ -85,12 +76,11 @@ function residualAt(branch: Branch, node: number, lambda: number): number {
 }
 
 /** Solves in a cell; true where the root is one the air passes through the way φ says (D > 0). */
-function tryCell(solver: SectionSolver, branch: Branch, cell: number, lambda: number): boolean {
-  const { record, found } = solver;
-  rootInCell(solver.balance, branch, cell, lambda, record, found);
+function tryCell(solver: SectionSolver, branch: Branch, cell: number): boolean {
+  if (!rootInCell(solver.balance, branch, cell)) return false;
+  const { record } = solver.balance;
   return (
-    found.converged &&
-    (record[DENOMINATOR] as number) + found.step * (record[DENOMINATOR_SLOPE] as number) > 0
+    (record[DENOMINATOR] as number) + (record[STEP] as number) * (record[DENOMINATOR_SLOPE] as number) > 0
   );
 }
 
@@ -108,9 +98,9 @@ function fallingCell(branch: Branch, lambda: number): number {
   return low;
 }
 
-/** |α| brought to [0, π]. */
-function attack(solver: SectionSolver, phi: number): number {
-  const alpha = phi - solver.balance.pitch;
+/** |α| of the root found, brought to [0, π]. */
+function attack({ balance: { record } }: SectionSolver): number {
+  const alpha = (record[ROOT] as number) - (record[PITCH] as number);
   return Math.abs(alpha - 2 * Math.PI * Math.round(alpha / (2 * Math.PI)));
 }
 
@@ -128,9 +118,9 @@ function scan(solver: SectionSolver, branch: Branch, lambda: number, choice: Cho
     const after = residualAt(branch, cell + 1, lambda);
     const crosses = before === 0 ? after !== 0 : before * after < 0;
     before = after;
-    if (!crosses || !tryCell(solver, branch, cell, lambda)) continue;
+    if (!crosses || !tryCell(solver, branch, cell)) continue;
     choice.count += 1;
-    const size = attack(solver, solver.found.phi);
+    const size = attack(solver);
     if (size >= choice.attack) continue;
     choice.branch = branch;
     choice.cell = cell;
@@ -147,9 +137,9 @@ function chosen(solver: SectionSolver, branches: readonly Branch[], lambda: numb
   for (const branch of branches) scan(solver, branch, lambda, choice);
   solver.multipleRoots = choice.count > 1;
   if (choice.branch === null) return false;
-  return choice.count === 1 && solver.found.converged && attack(solver, solver.found.phi) === choice.attack
+  return choice.count === 1 && attack(solver) === choice.attack
     ? true
-    : tryCell(solver, choice.branch, choice.cell, lambda);
+    : tryCell(solver, choice.branch, choice.cell);
 }
 
 /** The bracket the root is sought in; see docs/theory.md, 'Which root'. */
@@ -162,15 +152,16 @@ function bracketOf(solver: SectionSolver, lambda: number): Branch {
 }
 
 /**
- * Finds the section's root at a local speed ratio: true, with `found`, `record` and `multipleRoots` set, or false where
+ * Finds the section's root at a local speed ratio: true, with the balance's record at the root and `multipleRoots` set, or false where
  * there is no admissible root. Depends on nothing but the element, the options and the ratio.
  */
 export function findRoot(solver: SectionSolver, lambda: number): boolean {
   solver.multipleRoots = false;
+  solver.balance.record[LAMBDA] = lambda;
   const branch = bracketOf(solver, lambda);
   if (branch.falling) {
     const cell = fallingCell(branch, lambda);
-    if (cell >= 0 && tryCell(solver, branch, cell, lambda)) return true;
+    if (cell >= 0 && tryCell(solver, branch, cell)) return true;
   }
   if (chosen(solver, [branch], lambda)) return true;
   const everywhere = [
