@@ -30,6 +30,9 @@ export const CurveMarks = memo(function CurveMarks({
             fontSize={11}
             className="font-mono"
             fill="var(--ink)"
+            stroke="var(--paper)"
+            strokeWidth={3}
+            paintOrder="stroke"
           >
             {mark.label}
           </text>

@@ -42,7 +42,8 @@ export interface CurvePlotProps {
   readonly height?: number;
   readonly includeZero?: boolean;
   readonly xDomain?: readonly [number, number];
-  readonly extra?: ReactNode;
+  /** Stands in place of the title. */
+  readonly heading?: ReactNode;
 }
 
 const MARGIN = { left: 52, right: 48, top: 8, bottom: 34 } as const;
@@ -53,7 +54,7 @@ const NO_LIMITS: readonly PlotLimit[] = [];
 export function CurvePlot(props: CurvePlotProps) {
   const { title, unit, quantity, xTitle, xUnit, xQuantity, xSymbol, series, cursorX, differenceBaseId } =
     props;
-  const { onCursor, step = 0.1, height = 220, includeZero = true, xDomain, extra } = props;
+  const { onCursor, step = 0.1, height = 220, includeZero = true, xDomain, heading } = props;
   const { marks = NO_MARKS, limits = NO_LIMITS } = props;
   const [element, width] = useWidth<HTMLElement>(400);
   const svg = useRef<SVGSVGElement>(null);
@@ -96,7 +97,7 @@ export function CurvePlot(props: CurvePlotProps) {
           if (svg.current !== null)
             downloadText(standaloneSvg(svg.current, named), `${fileStem(title)}.svg`, 'image/svg+xml');
         }}
-        extra={extra}
+        heading={heading}
       />
       {asTable ? (
         <PlotTable

@@ -5,6 +5,7 @@ const PAINT = [
   'stroke-dasharray',
   'stroke-opacity',
   'fill-opacity',
+  'paint-order',
 ] as const;
 const TYPE = ['font-family', 'font-size', 'font-weight', 'text-anchor'] as const;
 

@@ -34,6 +34,9 @@ export const LimitLines = memo(function LimitLines({
             fontSize={10}
             className="font-sans"
             fill="var(--fails)"
+            stroke="var(--paper)"
+            strokeWidth={3}
+            paintOrder="stroke"
           >
             {limit.label}
           </text>

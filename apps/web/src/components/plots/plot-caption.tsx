@@ -57,7 +57,7 @@ export function PlotCaption({
   asTable,
   onTable,
   onExport,
-  extra,
+  heading,
 }: {
   title: string;
   unit: string;
@@ -67,15 +67,15 @@ export function PlotCaption({
   asTable: boolean;
   onTable: () => void;
   onExport: () => void;
-  extra?: ReactNode;
+  /** Stands in place of the title: a choice of what is plotted, say. */
+  heading?: ReactNode;
 }) {
   return (
     <figcaption className="flex h-6 items-center gap-3 overflow-hidden text-xs whitespace-nowrap">
       <span className="font-medium">
-        {title}
+        {heading ?? title}
         {unit !== '' && <span className="font-normal text-[var(--ink-soft)]">, {unit}</span>}
       </span>
-      {extra}
       <span className="ml-auto flex gap-3 overflow-hidden font-mono tabular-nums">
         {cursorX !== null &&
           series.map((line) => (

@@ -8,6 +8,8 @@ export interface PlotSeries {
   readonly kind: 'solid' | 'dashed';
   /** 0 to 6: place in the fixed series colours; dashed lines take their pattern from it as well. */
   readonly colorIndex: number;
+  /** A bound that belongs to another line (the angle of stall, say): drawn and read, never subtracted from anything. */
+  readonly bound?: true;
 }
 
 /** A point of a plot that carries a name of its own: a maximum, say. */

@@ -31,12 +31,15 @@ export interface SpanPlotProps {
   /** Height of the lines' area (px), the difference strip not counted. */
   readonly height?: number;
   readonly includeZero?: boolean;
+  /** Range of the axis; lines are cut off where they leave it. By default all of every line fits. */
+  readonly yDomain?: readonly [number, number];
   /** Line all others are held against in the strip beneath. */
   readonly differenceBaseId?: string;
   readonly limits?: readonly PlotLimit[];
   /** The stations themselves, drawn as dots. */
   readonly stations?: readonly (readonly [number, number])[];
-  readonly extra?: ReactNode;
+  /** Stands in place of the title. */
+  readonly heading?: ReactNode;
 }
 
 const TOP = 6;
@@ -52,10 +55,11 @@ export function SpanPlot({
   onCursor,
   height = 104,
   includeZero = false,
+  yDomain,
   differenceBaseId,
   limits = NO_LIMITS,
   stations,
-  extra,
+  heading,
 }: SpanPlotProps) {
   const axis = useSpanAxis();
   const svg = useRef<SVGSVGElement>(null);
@@ -65,9 +69,9 @@ export function SpanPlot({
   const y = useMemo(() => {
     const extras = [...limits.map((limit) => limit.value), ...(stations ?? []).map((dot) => dot[1])];
     return scaleLinear()
-      .domain(valueDomain(series, { includeZero, extra: extras }))
+      .domain(yDomain ?? valueDomain(series, { includeZero, extra: extras }))
       .range([bottom, TOP]);
-  }, [series, includeZero, limits, stations, bottom]);
+  }, [series, includeZero, yDomain, limits, stations, bottom]);
   const differences = useMemo(() => differencesFrom(series, differenceBaseId), [series, differenceBaseId]);
   const total = height + (differences.length > 0 ? DIFFERENCE_PX : 0);
   const named = `${title}${unit === '' ? '' : `, ${unit}`}`;
@@ -88,7 +92,7 @@ export function SpanPlot({
           if (svg.current !== null)
             downloadText(standaloneSvg(svg.current, named), `${fileStem(title)}.svg`, 'image/svg+xml');
         }}
-        extra={extra}
+        heading={heading}
       />
       {asTable ? (
         <PlotTable
@@ -114,7 +118,7 @@ export function SpanPlot({
           }}
         >
           <clipPath id={clipId}>
-            <rect x={axis.left - 4} y={0} width={axis.right - axis.left + 8 + 60} height={total} />
+            <rect x={axis.left - 4} y={0} width={axis.right - axis.left + 8 + 60} height={height} />
           </clipPath>
           <SpanGrid top={TOP} bottom={bottom} />
           <ValueAxis y={y} left={axis.left} right={axis.right} ticks={4} />

@@ -39,7 +39,17 @@ export function BladeMesh({
   return (
     <mesh geometry={geometry} renderOrder={ghost ? 1 : 0}>
       {ghost ? (
-        <meshBasicMaterial color={color} side={DoubleSide} transparent opacity={0.28} depthWrite={false} />
+        // Pushed back, so that it shows only where it stands out beyond the blade in hand.
+        <meshBasicMaterial
+          color={color}
+          side={DoubleSide}
+          transparent
+          opacity={0.4}
+          depthWrite={false}
+          polygonOffset
+          polygonOffsetFactor={4}
+          polygonOffsetUnits={16}
+        />
       ) : (
         <meshStandardMaterial color={color} side={DoubleSide} roughness={0.75} metalness={0} />
       )}

@@ -80,7 +80,7 @@ function RotorCurve({
   }, [live]);
   return (
     <CurvePlot
-      title={`${COEFFICIENTS[coefficient].title} ${COEFFICIENTS[coefficient].short}`}
+      title={COEFFICIENTS[coefficient].title}
       unit=""
       quantity={coefficient}
       xTitle="Tip-speed ratio λ"
@@ -95,7 +95,7 @@ function RotorCurve({
       limits={NO_LIMITS}
       xDomain={domain}
       height={264}
-      extra={<CoefficientChoice value={coefficient} onChoose={setCoefficient} />}
+      heading={<CoefficientChoice value={coefficient} onChoose={setCoefficient} />}
       {...(reference === null ? {} : { differenceBaseId: 'reference' })}
     />
   );

@@ -13,7 +13,7 @@ import { readPlotChoice, writePlotChoice } from '../lib/plot-choice.ts';
 import { CHORD, SPAN_QUANTITIES, TWIST } from '../lib/span-quantities.ts';
 import type { SpanQuantity } from '../lib/span-quantities.ts';
 import type { DrawnReference } from '../lib/studio-series.ts';
-import { spanSeries } from '../lib/studio-series.ts';
+import { alphaDomain, spanSeries } from '../lib/studio-series.ts';
 import { surfaceOf } from '../lib/surface-of.ts';
 import { Pending } from './pending.tsx';
 
@@ -49,6 +49,10 @@ function Plot({
   const { live, reference, cursors } = props;
   const cursorRadiusM = useCursor(cursors, (held) => held.radiusM);
   const series = useMemo(() => spanSeries(quantity, live, reference), [quantity, live, reference]);
+  const yDomain = useMemo(
+    () => (quantity.id === 'alpha' ? alphaDomain(live, reference) : undefined),
+    [quantity, live, reference],
+  );
   return (
     <SpanPlot
       title={quantity.title}
@@ -60,7 +64,8 @@ function Plot({
       onCursor={cursors.setRadius}
       height={92}
       limits={limits}
-      extra={choice}
+      heading={choice}
+      {...(yDomain === undefined ? {} : { yDomain })}
       {...(stations === undefined ? {} : { stations })}
       {...(reference === null ? {} : { differenceBaseId: 'reference' })}
     />
@@ -83,7 +88,7 @@ function PlotChooser({
       onChange={(event) => {
         onChoose(event.target.value);
       }}
-      className="h-6 max-w-32 rounded-xs border border-rule bg-sheet text-xs text-ink print:hidden"
+      className="h-6 max-w-48 font-medium rounded-xs border border-rule bg-sheet text-xs text-ink print:hidden"
     >
       {SPAN_QUANTITIES.map((quantity) => (
         <option key={quantity.id} value={quantity.id}>

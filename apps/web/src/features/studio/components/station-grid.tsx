@@ -135,7 +135,10 @@ export function StationGrid({ content, dispatch, notes, reference, cursorRow, on
 function StationTools({ count, grid }: { count: number; grid: ReturnType<typeof useStationGrid> }) {
   return (
     <div className="flex h-8 items-center gap-1">
-      <h2 className="m-0 mr-auto text-sm font-medium">Stations</h2>
+      <h2 className="sr-only">Stations</h2>
+      <span className="mr-auto text-[13px] text-ink-soft">
+        {count} {count === 1 ? 'station' : 'stations'}
+      </span>
       <Button small kind="quiet" onClick={grid.insert} aria-keyshortcuts="Insert" title="Insert">
         Insert
       </Button>

@@ -210,7 +210,7 @@ export function Studio({ draft, issues }: { draft: Draft; issues: readonly Speci
       {model.pinned.error !== null && (
         <Problem error={model.pinned.error} title="An airfoil could not be read." />
       )}
-      <div className="grid min-h-0 flex-1 gap-x-4 gap-y-6 pb-2 xl:grid-cols-[minmax(23rem,26rem)_minmax(0,1fr)_minmax(22rem,25rem)]">
+      <div className="grid min-h-0 flex-1 gap-x-4 gap-y-6 pb-2 xl:grid-cols-[minmax(22rem,25rem)_minmax(0,1fr)_minmax(23rem,27rem)]">
         <LeftColumn model={model} issues={issues} />
         {model.issue === undefined ? (
           <p role="alert" className="m-0 text-fails">

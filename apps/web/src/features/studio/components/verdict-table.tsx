@@ -32,7 +32,7 @@ function Row({ row, cursors }: { row: VerdictRow; cursors: CursorStore }) {
   const { verdict, value, limit, margin, place } = row;
   return (
     <tr className="border-t border-rule align-baseline">
-      <th scope="row" className="text-left text-[13px] font-normal" title={verdict.reason}>
+      <th scope="row" className="text-left text-[13px] leading-4 font-normal" title={verdict.reason}>
         {verdict.label}
         {verdict.unit !== '' && <span className="text-ink-soft">, {verdict.unit}</span>}
       </th>
@@ -40,7 +40,7 @@ function Row({ row, cursors }: { row: VerdictRow; cursors: CursorStore }) {
         <VerdictMark verdict={verdict.verdict} />
       </td>
       <td className="figures text-right text-[13px]">{value}</td>
-      <td className="figures text-right text-xs text-ink-soft">{limit}</td>
+      <td className="figures text-right text-xs whitespace-nowrap text-ink-soft">{limit}</td>
       <td className="figures text-right text-xs">{margin}</td>
       <td className="text-right">{place !== null && <PlaceButton place={place} cursors={cursors} />}</td>
     </tr>

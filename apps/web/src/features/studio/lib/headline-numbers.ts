@@ -25,10 +25,10 @@ interface Wanted {
 }
 
 const WANTED: readonly Wanted[] = [
-  { key: 'maxCp', label: 'Maximum CP', unit: '', quantity: 'cp', shared: true, live: (r) => r.maxCp },
+  { key: 'maxCp', label: 'Max CP', unit: '', quantity: 'cp', shared: true, live: (r) => r.maxCp },
   {
     key: 'tipSpeedRatioAtMaxCp',
-    label: 'λ at maximum CP',
+    label: 'λ at max CP',
     unit: '',
     quantity: 'lambda',
     shared: false,
@@ -36,7 +36,7 @@ const WANTED: readonly Wanted[] = [
   },
   {
     key: 'ctAtMaxCp',
-    label: 'CT at maximum CP',
+    label: 'CT at max CP',
     unit: '',
     quantity: 'ct',
     shared: true,
@@ -45,12 +45,12 @@ const WANTED: readonly Wanted[] = [
   { key: 'energyNetMWh', label: 'Annual energy (net)', unit: 'MWh', quantity: 'energyMWh', shared: true },
   {
     key: 'maxRootFlapMomentKNm',
-    label: 'Largest root flapwise moment',
+    label: 'Max root flapwise moment',
     unit: 'kN·m',
     quantity: 'momentKNm',
     shared: true,
   },
-  { key: 'maxThrustKN', label: 'Largest thrust', unit: 'kN', quantity: 'thrustKN', shared: true },
+  { key: 'maxThrustKN', label: 'Max thrust', unit: 'kN', quantity: 'thrustKN', shared: true },
 ];
 
 interface Sources {

@@ -2,11 +2,12 @@ import type { RotorCurve, SpanPoint, Station } from '@tipward/contract';
 import type { LiveResult } from '@tipward/design-model';
 import type { PlotMark, PlotSeries } from '../../../components/plots/plot-series.ts';
 import { formatQuantity } from '@tipward/design-model';
+import { valueDomain } from '../../../components/plots/value-domain.ts';
 import type { SpanQuantity } from './span-quantities.ts';
 
 const DRAFT = { id: 'draft', label: 'draft', kind: 'solid', colorIndex: 0 } as const;
 const REFERENCE = { id: 'reference', kind: 'dashed', colorIndex: 1 } as const;
-const STALL = { id: 'stall', label: 'stall', kind: 'dashed', colorIndex: 5 } as const;
+const STALL = { id: 'stall', label: 'stall', kind: 'dashed', colorIndex: 5, bound: true } as const;
 
 /** A reference to draw beside the draft. */
 export interface DrawnReference {
@@ -47,6 +48,16 @@ export function spanSeries(
     });
   lines.push({ ...DRAFT, points: along(draft.span.points, quantity.pick) });
   return lines;
+}
+
+/** Range of α that matters: that of the sections that lift; round roots stand far above it and would flatten the rest. */
+export function alphaDomain(draft: LiveResult, reference: DrawnReference | null): [number, number] {
+  const lifting = [...draft.span.points, ...(reference?.live.span.points ?? [])].filter(
+    (point) => point.thicknessPct <= STALL_SHOWN_PCT,
+  );
+  const points = lifting.map((point) => [point.radiusM, point.alphaDeg] as const);
+  const stall = lifting.map((point) => [point.radiusM, stallAngle(point)] as const);
+  return valueDomain([{ ...DRAFT, points: [...points, ...stall] }], { includeZero: true });
 }
 
 export type RotorCoefficient = 'cp' | 'ct';
