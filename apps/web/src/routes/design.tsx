@@ -1,3 +1,7 @@
+import { useParams } from 'react-router-dom';
+import { DesignPage } from '../features/designs/components/design-page.tsx';
+
 export function Component() {
-  return null;
+  const { designId = '' } = useParams();
+  return <DesignPage key={designId} designId={designId} />;
 }
