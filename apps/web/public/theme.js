@@ -1,7 +1,7 @@
 // Runs before the first paint, so that a page opened in the dark theme never flashes light. The application keeps the
 // choice under the same key (src/lib/theme/theme.ts).
 (function () {
-  var choice = null;
+  var choice;
   try {
     choice = localStorage.getItem('tipward-theme');
   } catch {

@@ -12,7 +12,7 @@ export interface PlotTableProps {
 }
 
 /** Arguments of all lines, ascending, each once. */
-export function tableArguments(series: readonly PlotSeries[]): number[] {
+function tableArguments(series: readonly PlotSeries[]): number[] {
   return [...new Set(series.flatMap((line) => line.points.map(([x]) => x)))].sort((a, b) => a - b);
 }
 
