@@ -1,3 +1,7 @@
+import { useParams } from 'react-router-dom';
+import { ReleasePage } from '../features/releases/components/release-page.tsx';
+
 export function Component() {
-  return null;
+  const { releaseId = '' } = useParams();
+  return <ReleasePage key={releaseId} releaseId={releaseId} />;
 }

@@ -1,3 +1,7 @@
+import { useParams } from 'react-router-dom';
+import { VersionPage } from '../features/versions/components/version-page.tsx';
+
 export function Component() {
-  return null;
+  const { versionId = '' } = useParams();
+  return <VersionPage key={versionId} versionId={versionId} />;
 }
