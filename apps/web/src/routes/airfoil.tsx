@@ -1,3 +1,7 @@
+import { useParams } from 'react-router-dom';
+import { AirfoilPage } from '../features/airfoils/components/airfoil-page.tsx';
+
 export function Component() {
-  return null;
+  const { airfoilId = '' } = useParams();
+  return <AirfoilPage key={airfoilId} airfoilId={airfoilId} />;
 }

@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { AirfoilsPage as Component } from '../features/airfoils/components/airfoils-page.tsx';

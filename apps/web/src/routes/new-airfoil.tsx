@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { NewAirfoilPage as Component } from '../features/airfoils/components/new-airfoil-page.tsx';
