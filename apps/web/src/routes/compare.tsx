@@ -1,3 +1,1 @@
-export function Component() {
-  return null;
-}
+export { ComparePage as Component } from '../features/compare/components/compare-page.tsx';
