@@ -28,6 +28,7 @@ export function NewAirfoilPage() {
   const navigate = useNavigate();
   const [text, setText] = useState('');
   const read = text.trim() === '' ? null : readAirfoilFile(text);
+  const airfoil = read?.airfoil ?? null;
   const submit = () => {
     if (airfoil === null) return;
     add.mutate({ body: airfoil }, { onSuccess: ({ id }) => void navigate(`/airfoils/${id}`) });
