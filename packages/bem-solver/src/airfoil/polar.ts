@@ -97,21 +97,26 @@ export function compilePolar(
   return { ...columns, bucket, nodes: polarNodes(columns, closed === rows ? 0 : 1) };
 }
 
-/** Places in the record of a look-up, which also carries the angle in. */
-export const ANGLE = 0;
-export const LIFT = 1;
-export const DRAG = 2;
-export const LIFT_SLOPE = 3;
-export const DRAG_SLOPE = 4;
-/** Angles (rad) between which the coefficients are one smooth piece, in the turn of the angle asked for. */
-export const PIECE_FROM = 5;
-export const PIECE_TO = 6;
-/** Places that a look-up uses. */
-export const LOOK_UP_PLACES = 7;
+/** A look-up: the angle asked for, and what was found. Slopes per rad. */
+export interface Coefficients {
+  /** Angle of attack, any turn (rad). */
+  angle: number;
+  lift: number;
+  drag: number;
+  liftSlope: number;
+  dragSlope: number;
+  /** Angles between which the coefficients are one smooth piece, in the turn of the angle. */
+  pieceFrom: number;
+  pieceTo: number;
+}
 
-/** Coefficients and their slopes (1/rad) at the angle of attack record[ANGLE] (rad, any turn), into the record. */
-export function lookUp(polar: Polar, record: Float64Array): void {
-  const angle = record[ANGLE] as number;
+export function newCoefficients(): Coefficients {
+  return { angle: NaN, lift: NaN, drag: NaN, liftSlope: NaN, dragSlope: NaN, pieceFrom: NaN, pieceTo: NaN };
+}
+
+/** Looks up the coefficients and their slopes at the angle in `at`. */
+export function lookUp(polar: Polar, at: Coefficients): void {
+  const { angle } = at;
   let turn = 0;
   if (angle > Math.PI || angle < -Math.PI) turn = TURN * Math.round(angle / TURN);
   const alpha = angle - turn;
@@ -125,38 +130,40 @@ export function lookUp(polar: Polar, record: Float64Array): void {
   while (cell > 0 && (xs[cell] as number) > alpha) cell -= 1;
   const x0 = xs[cell] as number;
   const x1 = xs[cell + 1] as number;
-  record[PIECE_FROM] = x0 + turn;
-  record[PIECE_TO] = x1 + turn;
+  at.pieceFrom = x0 + turn;
+  at.pieceTo = x1 + turn;
   const inverse = 1 / (x1 - x0);
   const lift = polar.cl[cell] as number;
   const drag = polar.cd[cell] as number;
-  const liftRise = (polar.cl[cell + 1] as number) - lift;
-  const dragRise = (polar.cd[cell + 1] as number) - drag;
-  const t = (alpha - x0) * inverse;
-  record[LIFT] = lift + t * liftRise;
-  record[DRAG] = drag + t * dragRise;
-  record[LIFT_SLOPE] = liftRise * inverse;
-  record[DRAG_SLOPE] = dragRise * inverse;
-  if (polar.clSlope === null || polar.cdSlope === null) return;
-  bend(record, LIFT, polar.clSlope, cell, t);
-  bend(record, DRAG, polar.cdSlope, cell, t);
+  const liftChord = ((polar.cl[cell + 1] as number) - lift) * inverse;
+  const dragChord = ((polar.cd[cell + 1] as number) - drag) * inverse;
+  const way = alpha - x0;
+  at.lift = lift + way * liftChord;
+  at.drag = drag + way * dragChord;
+  at.liftSlope = liftChord;
+  at.dragSlope = dragChord;
+  if (polar.clSlope !== null && polar.cdSlope !== null)
+    bend(at, polar.clSlope, polar.cdSlope, cell, way * inverse);
 }
 
-/** Turns the chord at record[at] (its slope two places on) into the cubic of the slopes at both ends of the cell. */
-function bend(record: Float64Array, at: number, slopes: Float64Array, cell: number, t: number): void {
-  const chord = record[at + 2] as number;
-  const width = (record[PIECE_TO] as number) - (record[PIECE_FROM] as number);
-  const m0 = (slopes[cell] as number) - chord;
-  const m1 = (slopes[cell + 1] as number) - chord;
+/** Turns the chords of a cell into the cubics that have the slopes at its ends, at the share t of its width. */
+function bend(at: Coefficients, clSlope: Float64Array, cdSlope: Float64Array, cell: number, t: number): void {
   const u = 1 - t;
-  record[at] = (record[at] as number) + width * t * u * (u * m0 - t * m1);
-  record[at + 2] = chord + u * (1 - 3 * t) * m0 + t * (3 * t - 2) * m1;
+  const reach = (at.pieceTo - at.pieceFrom) * t * u;
+  const lift0 = (clSlope[cell] as number) - at.liftSlope;
+  const lift1 = (clSlope[cell + 1] as number) - at.liftSlope;
+  const drag0 = (cdSlope[cell] as number) - at.dragSlope;
+  const drag1 = (cdSlope[cell + 1] as number) - at.dragSlope;
+  at.lift += reach * (u * lift0 - t * lift1);
+  at.drag += reach * (u * drag0 - t * drag1);
+  at.liftSlope += u * (1 - 3 * t) * lift0 + t * (3 * t - 2) * lift1;
+  at.dragSlope += u * (1 - 3 * t) * drag0 + t * (3 * t - 2) * drag1;
 }
 
 /** Lift and drag coefficient at an angle of attack (rad, any turn). */
 export function coefficientsAt(polar: Polar, alphaRad: number): { cl: number; cd: number } {
-  const record = new Float64Array(LOOK_UP_PLACES);
-  record[ANGLE] = alphaRad;
-  lookUp(polar, record);
-  return { cl: record[LIFT] as number, cd: record[DRAG] as number };
+  const at = newCoefficients();
+  at.angle = alphaRad;
+  lookUp(polar, at);
+  return { cl: at.lift, cd: at.drag };
 }

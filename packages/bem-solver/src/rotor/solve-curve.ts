@@ -3,8 +3,7 @@ import { brentMaximum } from '../numerics/maximum.ts';
 import { newSectionSolver } from '../section/section-solver.ts';
 import type { Rotor } from './rotor.ts';
 import type { PointStatus } from './solve-point.ts';
-import type { UnitLoads } from './unit-loads.ts';
-import { addLoads, newLoads, takeElement, unitLoads } from './unit-loads.ts';
+import { addCurve, LOAD_PLACES, takeElement, THRUST, TORQUE, unitLoads } from './unit-loads.ts';
 
 /** Coefficients of a curve; NaN, and the status, mark a point some section of which has no solution. */
 export interface CurveResult {
@@ -27,20 +26,19 @@ export function solveCurve(
   requireNumber('pitchDeg', pitchDeg, -360, 360);
   const ratios = Float64Array.from(tipSpeedRatios);
   ratios.forEach((lambda, i) => requireNumber(`tipSpeedRatios[${i}]`, lambda, 0));
-  const sums = Array.from(ratios, newLoads);
+  const loads = new Float64Array(LOAD_PLACES * ratios.length);
   const pitch = (pitchDeg * Math.PI) / 180;
   for (const element of rotor.elements) {
-    if (!takeElement(rotor, element, pitch, solver)) continue;
-    for (let i = 0; i < sums.length; i += 1)
-      addLoads(rotor, element, solver, ratios[i] as number, sums[i] as UnitLoads);
+    if (takeElement(rotor, element, pitch, solver)) addCurve(rotor, element, solver, ratios, loads);
   }
+  const load = (i: number, place: number) => loads[LOAD_PLACES * i + place] as number;
   const area = Math.PI * rotor.tipRadiusM ** 2;
-  const cq = Float64Array.from(sums, (loads) => loads.torque / (area * rotor.tipRadiusM));
+  const cq = ratios.map((_, i) => load(i, TORQUE) / (area * rotor.tipRadiusM));
   return {
     cp: cq.map((value, i) => value * (ratios[i] ?? NaN)),
-    ct: Float64Array.from(sums, (loads) => loads.thrust / area),
+    ct: ratios.map((_, i) => load(i, THRUST) / area),
     cq,
-    statuses: sums.map((loads) => (Number.isNaN(loads.torque) ? 'sections-unsolved' : 'converged')),
+    statuses: Array.from(cq, (value) => (Number.isNaN(value) ? 'sections-unsolved' : 'converged')),
   };
 }
 
@@ -60,7 +58,8 @@ export function maximumCp(
   const at = (i: number) => lambdaMin + ((lambdaMax - lambdaMin) * i) / COARSE;
   const area = Math.PI * rotor.tipRadiusM ** 2;
   const cpAt = (lambda: number) => {
-    const cp = (unitLoads(rotor, lambda, pitchDeg, solver).torque * lambda) / (area * rotor.tipRadiusM);
+    const cp =
+      ((unitLoads(rotor, lambda, pitchDeg, solver)[TORQUE] as number) * lambda) / (area * rotor.tipRadiusM);
     return Number.isFinite(cp) ? cp : -Infinity;
   };
   let best = 0;
@@ -77,6 +76,6 @@ export function maximumCp(
   return {
     tipSpeedRatio: top.x,
     cp: top.value,
-    ct: unitLoads(rotor, top.x, pitchDeg, solver).thrust / area,
+    ct: (unitLoads(rotor, top.x, pitchDeg, solver)[THRUST] as number) / area,
   };
 }

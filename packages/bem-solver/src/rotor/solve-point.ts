@@ -3,7 +3,7 @@ import { newSectionSolver } from '../section/section-solver.ts';
 import type { SectionState, SectionStatus } from '../section/solve-section.ts';
 import { emptyState, solveState } from '../section/solve-section.ts';
 import type { Rotor, RotorElement } from './rotor.ts';
-import { addLoads, newLoads, takeElement } from './unit-loads.ts';
+import { addLoads, EDGE, FLAP, LOAD_PLACES, takeElement, THRUST, TORQUE } from './unit-loads.ts';
 
 export interface OperatingState {
   readonly windSpeedMS: number;
@@ -102,7 +102,7 @@ export function solvePoint(
   const tipSpeedRatio = (omega * rotor.tipRadiusM) / wind;
   const failedStations: number[] = [];
   const rows: SectionResult[] = [];
-  const loads = newLoads();
+  const loads = new Float64Array(LOAD_PLACES);
   rotor.elements.forEach((element, index) => {
     const loaded = takeElement(rotor, element, point.pitchDeg / DEG, solver);
     if (loaded && !addLoads(rotor, element, solver, tipSpeedRatio, loads)) failedStations.push(index);
@@ -115,7 +115,8 @@ export function solvePoint(
   const area = Math.PI * rotor.tipRadiusM ** 2;
   const pressure = 0.5 * rotor.air.densityKgM3 * wind * wind;
   const when = (value: number) => (solved ? orNull(value) : null);
-  const cq = loads.torque / (area * rotor.tipRadiusM);
+  const load = (place: number) => loads[place] as number;
+  const cq = load(TORQUE) / (area * rotor.tipRadiusM);
   return {
     windSpeedMS: wind,
     rotorSpeedRpm: (omega * 30) / Math.PI,
@@ -124,13 +125,13 @@ export function solvePoint(
     status: solved ? 'converged' : 'sections-unsolved',
     failedStations,
     cp: when(cq * tipSpeedRatio),
-    ct: when(loads.thrust / area),
+    ct: when(load(THRUST) / area),
     cq: when(cq),
-    powerW: when(loads.torque * pressure * omega),
-    thrustN: when(loads.thrust * pressure),
-    torqueNm: when(loads.torque * pressure),
-    rootFlapMomentNm: when(loads.flap * pressure),
-    rootEdgeMomentNm: when(loads.edge * pressure),
+    powerW: when(load(TORQUE) * pressure * omega),
+    thrustN: when(load(THRUST) * pressure),
+    torqueNm: when(load(TORQUE) * pressure),
+    rootFlapMomentNm: when(load(FLAP) * pressure),
+    rootEdgeMomentNm: when(load(EDGE) * pressure),
     ...(sections ? { sections: rows } : {}),
   };
 }

@@ -1,20 +1,5 @@
 import type { PolarNodes } from '../airfoil/polar-nodes.ts';
-import { DRAG, DRAG_SLOPE, LIFT, LIFT_SLOPE } from '../airfoil/polar.ts';
-import {
-  balanceForces,
-  COSINE,
-  DENOMINATOR,
-  DENOMINATOR_PER_CN,
-  DENOMINATOR_SLOPE,
-  DRAG_SHARE,
-  evaluateBalance,
-  NUMERATOR,
-  NUMERATOR_SLOPE,
-  PHI,
-  PITCH,
-  SIGMA,
-  SINE,
-} from './balance.ts';
+import { balanceForces, evaluateBalance } from './balance.ts';
 import type { Balance } from './balance.ts';
 
 /**
@@ -72,13 +57,13 @@ const TURN = 2 * Math.PI;
 /** Nodes nearer than this to an end of the range are left out. */
 const END_GAP = 1e-9;
 
-/** Takes the balance as the record has it, with the slopes to the right, as the node at `i`. */
-function take(branch: Branch, i: number, record: Float64Array): void {
-  const N = record[NUMERATOR] as number;
-  const D = record[DENOMINATOR] as number;
+/** Takes the balance as it stands, with the slopes to the right, as the node at `i`. */
+function take(branch: Branch, i: number, balance: Balance): void {
+  const N = balance.numerator;
+  const D = balance.denominator;
   const lambda = N / D;
-  const slope = ((record[NUMERATOR_SLOPE] as number) - lambda * (record[DENOMINATOR_SLOPE] as number)) / D;
-  branch.phi[i] = record[PHI] as number;
+  const slope = (balance.numeratorSlope - lambda * balance.denominatorSlope) / D;
+  branch.phi[i] = balance.phi;
   branch.numerator[i] = N;
   branch.denominator[i] = D;
   branch.lambda[i] = lambda;
@@ -87,9 +72,9 @@ function take(branch: Branch, i: number, record: Float64Array): void {
 }
 
 function takePoint(balance: Balance, branch: Branch, i: number, phi: number): void {
-  balance.record[PHI] = phi;
+  balance.phi = phi;
   evaluateBalance(balance);
-  take(branch, i, balance.record);
+  take(branch, i, balance);
 }
 
 /** First of the ascending angles above `at`. */
@@ -106,34 +91,31 @@ function firstAbove(angles: Float64Array, at: number): number {
 
 /** A node of the polar as the branch's node at `i`; the slope to its left differs where the polar has a kink there. */
 function takeNode(balance: Balance, branch: Branch, i: number, nodes: PolarNodes, k: number): void {
-  const { record } = balance;
   const clSlope = nodes.clSlopeAfter[k] as number;
   const cdSlope = nodes.cdSlopeAfter[k] as number;
-  record[LIFT] = nodes.cl[k] as number;
-  record[DRAG] = nodes.cd[k] as number;
-  record[LIFT_SLOPE] = clSlope;
-  record[DRAG_SLOPE] = cdSlope;
+  balance.section.lift = nodes.cl[k] as number;
+  balance.section.drag = nodes.cd[k] as number;
+  balance.section.liftSlope = clSlope;
+  balance.section.dragSlope = cdSlope;
   balanceForces(balance);
-  take(branch, i, record);
+  take(branch, i, balance);
   const liftKink = (nodes.clSlopeBefore[k] as number) - clSlope;
-  const dragKink = (record[DRAG_SHARE] as number) * ((nodes.cdSlopeBefore[k] as number) - cdSlope);
-  const s = record[SINE] as number;
-  const c = record[COSINE] as number;
+  const dragKink = balance.dragShare * ((nodes.cdSlopeBefore[k] as number) - cdSlope);
+  const s = balance.sine;
+  const c = balance.cosine;
   const cnKink = liftKink * c + dragKink * s;
   const ctKink = liftKink * s - dragKink * c;
   const lambda = branch.lambda[i] as number;
-  const change =
-    -(record[SIGMA] as number) * ctKink - lambda * (record[DENOMINATOR_PER_CN] as number) * cnKink;
-  branch.slopeBefore[i] = (branch.slopeAfter[i] as number) + change / (record[DENOMINATOR] as number);
+  const change = -balance.sigma * ctKink - lambda * balance.denominatorPerCn * cnKink;
+  branch.slopeBefore[i] = (branch.slopeAfter[i] as number) + change / balance.denominator;
 }
 
 /** Tabulates the balance over [low, high], which must not hold φ = 0: at its ends and at every node of the polar between. */
 export function tabulate(balance: Balance, low: number, high: number, branch: Branch): void {
-  const { record } = balance;
   const { nodes } = balance.polar;
   const { alpha, sine, cosine } = nodes;
   makeRoom(branch, alpha.length + 2);
-  const pitch = record[PITCH] as number;
+  const pitch = balance.pitch;
   const sinPitch = Math.sin(pitch);
   const cosPitch = Math.cos(pitch);
   takePoint(balance, branch, 0, low);
@@ -150,9 +132,9 @@ export function tabulate(balance: Balance, low: number, high: number, branch: Br
     if (phi > high - END_GAP) break;
     const sa = sine[k] as number;
     const ca = cosine[k] as number;
-    record[PHI] = phi;
-    record[SINE] = sa * cosPitch + ca * sinPitch;
-    record[COSINE] = ca * cosPitch - sa * sinPitch;
+    balance.phi = phi;
+    balance.sine = sa * cosPitch + ca * sinPitch;
+    balance.cosine = ca * cosPitch - sa * sinPitch;
     takeNode(balance, branch, count, nodes, k);
     count += 1;
     k += 1;
@@ -187,13 +169,9 @@ const TURN_STEPS = 24;
 
 /** dλr/dφ times D² at φ: the sign tells where λr(φ) turns. */
 function slopeSign(balance: Balance, phi: number): number {
-  const { record } = balance;
-  record[PHI] = phi;
+  balance.phi = phi;
   evaluateBalance(balance);
-  return (
-    (record[NUMERATOR_SLOPE] as number) * (record[DENOMINATOR] as number) -
-    (record[NUMERATOR] as number) * (record[DENOMINATOR_SLOPE] as number)
-  );
+  return balance.numeratorSlope * balance.denominator - balance.numerator * balance.denominatorSlope;
 }
 
 /** Where λr(φ) turns between two nodes, the turn becomes a node: then no two roots share a cell. */

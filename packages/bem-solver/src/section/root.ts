@@ -1,16 +1,4 @@
-import {
-  DENOMINATOR,
-  DENOMINATOR_SLOPE,
-  evaluateBalance,
-  LAMBDA,
-  NUMERATOR,
-  NUMERATOR_SLOPE,
-  PHI,
-  PHI_FROM,
-  PHI_TO,
-  ROOT,
-  STEP,
-} from './balance.ts';
+import { evaluateBalance } from './balance.ts';
 import type { Balance } from './balance.ts';
 import type { Branch } from './branch.ts';
 
@@ -43,21 +31,20 @@ function startIn(branch: Branch, cell: number, lambda: number): number {
   return x0 + width * (share > 0 && share < 1 ? share : 0.5);
 }
 
-/** True: the root is `step` from where the record was evaluated. */
-function arrived(record: Float64Array, step: number): boolean {
-  record[ROOT] = (record[PHI] as number) + step;
-  record[STEP] = step;
+/** True: the root is `step` from where the balance was evaluated. */
+function arrived(balance: Balance, step: number): boolean {
+  balance.root = balance.phi + step;
+  balance.step = step;
   return true;
 }
 
 /**
- * The root of λr·D − N at record[LAMBDA] in a cell of the branch, by Newton's method kept inside the cell by bisection. Stops
+ * The root of λr·D − N at the balance's λr in a cell of the branch, by Newton's method kept inside the cell by bisection. Stops
  * when the next step is below 2e-8 rad on a smooth piece (the step is then taken), or below the spacing of numbers.
- * @returns whether it converged; the root and the last step are in the record
+ * @returns whether it converged; the root and the last step are in the balance
  */
 export function rootInCell(balance: Balance, branch: Branch, cell: number): boolean {
-  const { record } = balance;
-  const lambda = record[LAMBDA] as number;
+  const lambda = balance.lambda;
   let low = branch.phi[cell] as number;
   let high = branch.phi[cell + 1] as number;
   const atLow = lambda * (branch.denominator[cell] as number) - (branch.numerator[cell] as number);
@@ -65,19 +52,18 @@ export function rootInCell(balance: Balance, branch: Branch, cell: number): bool
   let phi = startIn(branch, cell, lambda);
   if (!(phi >= low && phi <= high)) phi = 0.5 * (low + high);
   for (let count = 0; count < MAX_STEPS; count += 1) {
-    record[PHI] = phi;
+    balance.phi = phi;
     evaluateBalance(balance);
-    const g = lambda * (record[DENOMINATOR] as number) - (record[NUMERATOR] as number);
-    const step = -g / (lambda * (record[DENOMINATOR_SLOPE] as number) - (record[NUMERATOR_SLOPE] as number));
+    const g = lambda * balance.denominator - balance.numerator;
+    const step = -g / (lambda * balance.denominatorSlope - balance.numeratorSlope);
     const next = phi + step;
     const size = Math.abs(step);
     // Convergence comes before the look at the bracket: rounding may put a converged step just outside.
-    if (size <= lastStep && next >= (record[PHI_FROM] as number) && next <= (record[PHI_TO] as number))
-      return arrived(record, step);
-    if (size <= 4e-16 * (Math.abs(phi) + 1e-3)) return arrived(record, step);
+    if (size <= lastStep && next >= balance.phiFrom && next <= balance.phiTo) return arrived(balance, step);
+    if (size <= 4e-16 * (Math.abs(phi) + 1e-3)) return arrived(balance, step);
     if (g * atLow > 0) low = phi;
     else high = phi;
-    if (high - low <= 4e-16 * Math.abs(phi) || g === 0) return arrived(record, 0);
+    if (high - low <= 4e-16 * Math.abs(phi) || g === 0) return arrived(balance, 0);
     phi = next > low && next < high ? next : 0.5 * (low + high);
   }
   return false;

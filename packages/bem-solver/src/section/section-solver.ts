@@ -1,14 +1,5 @@
 import type { Balance } from './balance.ts';
-import {
-  DENOMINATOR,
-  DENOMINATOR_SLOPE,
-  LAMBDA,
-  newBalance,
-  PITCH,
-  ROOT,
-  setBalance,
-  STEP,
-} from './balance.ts';
+import { newBalance, setBalance } from './balance.ts';
 import type { Branch } from './branch.ts';
 import { newBranch, tabulate } from './branch.ts';
 import type { Polar } from '../airfoil/polar.ts';
@@ -78,10 +69,8 @@ function residualAt(branch: Branch, node: number, lambda: number): number {
 /** Solves in a cell; true where the root is one the air passes through the way φ says (D > 0). */
 function tryCell(solver: SectionSolver, branch: Branch, cell: number): boolean {
   if (!rootInCell(solver.balance, branch, cell)) return false;
-  const { record } = solver.balance;
-  return (
-    (record[DENOMINATOR] as number) + (record[STEP] as number) * (record[DENOMINATOR_SLOPE] as number) > 0
-  );
+  const { balance } = solver;
+  return balance.denominator + balance.step * balance.denominatorSlope > 0;
 }
 
 /** The one cell of a falling branch that holds λr; −1 where there is none. */
@@ -99,8 +88,8 @@ function fallingCell(branch: Branch, lambda: number): number {
 }
 
 /** |α| of the root found, brought to [0, π]. */
-function attack({ balance: { record } }: SectionSolver): number {
-  const alpha = (record[ROOT] as number) - (record[PITCH] as number);
+function attack({ balance }: SectionSolver): number {
+  const alpha = balance.root - balance.pitch;
   return Math.abs(alpha - 2 * Math.PI * Math.round(alpha / (2 * Math.PI)));
 }
 
@@ -152,17 +141,22 @@ function bracketOf(solver: SectionSolver, lambda: number): Branch {
 }
 
 /**
- * Finds the section's root at a local speed ratio: true, with the balance's record at the root and `multipleRoots` set, or false where
- * there is no admissible root. Depends on nothing but the element, the options and the ratio.
+ * Finds the section's root at the local speed ratio set in the balance: true, with the balance at the root and
+ * `multipleRoots` set, or false where there is no admissible root. Depends on nothing but the element, the options and the
+ * ratio.
  */
-export function findRoot(solver: SectionSolver, lambda: number): boolean {
+export function findRoot(solver: SectionSolver): boolean {
+  const lambda = solver.balance.lambda;
   solver.multipleRoots = false;
-  solver.balance.record[LAMBDA] = lambda;
   const branch = bracketOf(solver, lambda);
   if (branch.falling) {
     const cell = fallingCell(branch, lambda);
     if (cell >= 0 && tryCell(solver, branch, cell)) return true;
   }
+  return findAmong(solver, branch, lambda);
+}
+
+function findAmong(solver: SectionSolver, branch: Branch, lambda: number): boolean {
   if (chosen(solver, [branch], lambda)) return true;
   const everywhere = [
     need(solver, solver.farBelow, -HALF_PI, -EPSILON),

@@ -1,19 +1,4 @@
-import { DRAG, LIFT } from '../airfoil/polar.ts';
-import {
-  CN,
-  COSINE,
-  CT,
-  DENOMINATOR,
-  DRAG_SHARE,
-  evaluateBalance,
-  FACTOR,
-  NUMERATOR,
-  PHI,
-  PITCH,
-  ROOT,
-  SIGMA,
-  SINE,
-} from './balance.ts';
+import { evaluateBalance } from './balance.ts';
 import type { Polar } from '../airfoil/polar.ts';
 import type { LossShape } from './loss.ts';
 import type { SolverOptions } from './options.ts';
@@ -98,34 +83,33 @@ export function solveSection(
 
 /** The state of the solver's element at a local speed ratio. */
 export function solveState(solver: SectionSolver, lambda: number, state: SectionState): SectionState {
-  if (!findRoot(solver, lambda)) return unsolved(state);
   const { balance } = solver;
-  const { record } = balance;
-  const phi = record[ROOT] as number;
-  record[PHI] = phi;
+  balance.lambda = lambda;
+  if (!findRoot(solver)) return unsolved(state);
+  const phi = balance.root;
+  balance.phi = phi;
   evaluateBalance(balance);
-  const value = (place: number) => record[place] as number;
-  const [s, c, F, D, N] = [value(SINE), value(COSINE), value(FACTOR), value(DENOMINATOR), value(NUMERATOR)];
-  const [cl, cd] = [value(LIFT), value(DRAG)];
+  const { sine: s, cosine: c, factor: F, denominator: D, numerator: N } = balance;
+  const { lift: cl, drag: cd } = balance.section;
   const mag = Math.abs(s);
   // cos φ is taken as 1: at standstill all terms vanish with it.
   const scale =
     lambda * Math.abs(D) +
     4 * F * mag +
-    value(SIGMA) * (Math.abs(cl) * mag + value(DRAG_SHARE) * Math.abs(cd));
+    balance.sigma * (Math.abs(cl) * mag + balance.dragShare * Math.abs(cd));
   const residual = Math.abs(lambda * D - N) / (scale + Number.MIN_VALUE);
   if (!(residual <= RESIDUAL_TOLERANCE)) return unsolved(state);
   // D = 4F|s|h, h = sinφ/(1 − a) = V/W
   const speed = (4 * F * mag) / D;
-  const alpha = phi - value(PITCH);
+  const alpha = phi - balance.pitch;
   state.status = 'converged';
   state.phi = phi;
   state.alpha = alpha - 2 * Math.PI * Math.round(alpha / (2 * Math.PI));
   state.F = F;
   state.cl = cl;
   state.cd = cd;
-  state.cn = value(CN);
-  state.ct = value(CT);
+  state.cn = balance.cn;
+  state.ct = balance.ct;
   state.speedSquared = speed * speed;
   state.a = 1 - s * speed;
   state.aPrime = lambda > 0 ? (c * speed) / lambda - 1 : NaN;
