@@ -63,7 +63,7 @@ export function KeyNumberTable({ items, baseId }: { items: readonly NumberedItem
         <tbody>
           {KEY_NUMBER_ROWS.map((row) => (
             <tr key={row.key} className="h-7 border-t border-rule">
-              <th scope="row" className="text-left text-[13px] font-normal whitespace-nowrap">
+              <th scope="row" className="text-left text-[13px] font-normal">
                 {row.label}
                 {row.unit !== '' && <span className="text-ink-soft">, {row.unit}</span>}
               </th>

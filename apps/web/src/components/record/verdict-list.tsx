@@ -8,10 +8,12 @@ const PLACES = {
   'tip-speed-ratio': (value: number) => `λ ${formatQuantity('lambda', value)}`,
 };
 
-const number = (value: number | null) => (value === null ? '–' : formatQuantity('factor', value));
+/** CP to four decimals, everything else a requirement limits to three. */
+const number = (kind: string, value: number | null) =>
+  formatQuantity(kind === 'min-cp' ? 'cp' : 'factor', value);
 
 function Row({ verdict }: { verdict: Verdict }) {
-  const { label, unit, bound, limit, value, margin, at, reason } = verdict;
+  const { kind, label, unit, bound, limit, value, margin, at, reason } = verdict;
   return (
     <tr className="h-7 border-t border-rule align-baseline">
       <th scope="row" className="text-left font-normal" title={reason}>
@@ -22,12 +24,12 @@ function Row({ verdict }: { verdict: Verdict }) {
       <td>
         <VerdictMark verdict={verdict.verdict} />
       </td>
-      <td className="figures text-right">{number(value)}</td>
+      <td className="figures text-right">{number(kind, value)}</td>
       <td className="figures text-right whitespace-nowrap text-ink-soft">
         {bound === 'upper' ? '≤ ' : '≥ '}
-        {number(limit)}
+        {number(kind, limit)}
       </td>
-      <td className="figures text-right">{number(margin)}</td>
+      <td className="figures text-right">{number(kind, margin)}</td>
       <td className="figures text-right whitespace-nowrap">
         {at === null ? '–' : PLACES[at.quantity](at.value)}
       </td>
