@@ -25,19 +25,18 @@ export function Dialog({ open, onOpenChange, title, description, wide = false, c
             wide ? 'max-w-3xl' : 'max-w-lg',
           )}
         >
-          <div className="flex items-start gap-4">
-            <Parts.Title className="m-0 text-lg font-semibold">{title}</Parts.Title>
-            <Parts.Close
-              aria-label="Close"
-              className="ml-auto grid size-7 shrink-0 cursor-pointer place-items-center rounded-xs border-0 bg-transparent text-lg text-ink-soft hover:bg-panel hover:text-ink"
-            >
-              <span aria-hidden="true">×</span>
-            </Parts.Close>
-          </div>
+          <Parts.Title className="m-0 pr-9 text-lg font-semibold wrap-anywhere">{title}</Parts.Title>
           {description !== undefined && (
             <Parts.Description className="m-0 mt-1 text-ink-soft">{description}</Parts.Description>
           )}
           <div className="mt-4 flex flex-col gap-4">{children}</div>
+          {/* Last, so that the focus begins in what the dialogue is about. */}
+          <Parts.Close
+            aria-label="Close"
+            className="absolute top-4 right-4 grid size-7 shrink-0 cursor-pointer place-items-center rounded-xs border-0 bg-transparent text-lg text-ink-soft hover:bg-panel hover:text-ink"
+          >
+            <span aria-hidden="true">×</span>
+          </Parts.Close>
         </Parts.Content>
       </Parts.Portal>
     </Parts.Root>

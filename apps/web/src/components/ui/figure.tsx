@@ -5,6 +5,8 @@ export interface FigureProps {
   unit?: string | undefined;
   /** Already formatted (formatQuantity); '–' where there is none. */
   value: string;
+  /** The value is words, not a number. */
+  words?: boolean | undefined;
   /** Why there is no value, or why it is to be read with care; marks the figure. */
   reason?: string | undefined;
   /** Beneath the value: a difference, the λ it was found at. */
@@ -12,7 +14,7 @@ export interface FigureProps {
 }
 
 /** One number a person compares: label and unit above, value in tabular figures. Put several into a <dl>. */
-export function Figure({ label, unit, value, reason, note }: FigureProps) {
+export function Figure({ label, unit, value, words = false, reason, note }: FigureProps) {
   return (
     <div className="min-w-0">
       <dt className="text-[13px] text-ink-soft">
@@ -20,7 +22,7 @@ export function Figure({ label, unit, value, reason, note }: FigureProps) {
         {unit !== undefined && unit !== '' && `, ${unit}`}
       </dt>
       <dd className="m-0">
-        <span className="figures text-base" title={reason}>
+        <span className={words ? '' : 'figures text-base'} title={reason}>
           {value}
         </span>
         {reason !== undefined && value !== '–' && (

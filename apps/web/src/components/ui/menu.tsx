@@ -15,16 +15,14 @@ export function Menu({
   return (
     <DropdownMenu.Root defaultOpen={defaultOpen} modal={false}>
       <DropdownMenu.Trigger asChild>{trigger}</DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
-        <DropdownMenu.Content
-          align="end"
-          sideOffset={4}
-          collisionPadding={8}
-          className="z-50 min-w-48 rounded-xs border border-rule-strong bg-paper py-1 shadow-float"
-        >
-          {children}
-        </DropdownMenu.Content>
-      </DropdownMenu.Portal>
+      <DropdownMenu.Content
+        align="end"
+        sideOffset={4}
+        collisionPadding={8}
+        className="z-50 min-w-48 rounded-xs border border-rule-strong bg-paper py-1 shadow-float"
+      >
+        {children}
+      </DropdownMenu.Content>
     </DropdownMenu.Root>
   );
 }

@@ -11,7 +11,7 @@ export function VerdictCounts({ verdicts }: { verdicts: readonly Verdict[] }) {
     count: verdicts.filter((entry) => entry.verdict === outcome).length,
   })).filter((entry) => entry.count > 0);
   return (
-    <span className="inline-flex flex-wrap gap-x-3">
+    <span className="inline-flex gap-x-3">
       {counted.map(({ outcome, count }) => {
         const verb = count === 1 || outcome === 'unknown' ? outcome : outcome.slice(0, -1);
         return <VerdictMark key={outcome} verdict={outcome} word={`${String(count)} ${verb}`} />;

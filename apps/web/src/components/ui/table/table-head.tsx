@@ -3,6 +3,15 @@ import type { Column, SortState } from './column.ts';
 
 const ARROWS = { ascending: '▲', descending: '▼', none: '' } as const;
 
+/** On the side where it does not push figures out of line with their head. */
+function Arrow({ direction }: { direction: keyof typeof ARROWS }) {
+  return (
+    <span aria-hidden="true" className="inline-block w-4 text-center text-[9px] text-accent">
+      {ARROWS[direction]}
+    </span>
+  );
+}
+
 function HeadCell<Row>({
   column,
   sort,
@@ -42,10 +51,9 @@ function HeadCell<Row>({
             onSort({ columnId: column.id, descending: mine !== null && !mine.descending });
           }}
         >
+          {column.numeric === true && <Arrow direction={direction} />}
           {label}
-          <span aria-hidden="true" className="inline-block w-4 text-center text-[9px] text-accent">
-            {ARROWS[direction]}
-          </span>
+          {column.numeric !== true && <Arrow direction={direction} />}
         </button>
       )}
     </th>

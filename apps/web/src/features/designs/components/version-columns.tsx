@@ -60,7 +60,7 @@ const ABOUT: Column<VersionSummary>[] = [
     id: 'note',
     header: 'Note',
     cell: ({ note }) => (
-      <span className="line-clamp-2 min-w-48 wrap-anywhere" title={note}>
+      <span className="block max-w-64 truncate" title={note}>
         {note}
       </span>
     ),

@@ -17,6 +17,17 @@ const FILLS: Partial<Record<VersionSummary['state'], string>> = {
 
 function Branch({ node }: { node: TreeNode }) {
   if (node.parent === null) return null;
+  if (node.parent.lane === node.lane)
+    return (
+      <line
+        x1={x(node.parent)}
+        y1={y(node)}
+        x2={x(node)}
+        y2={y(node)}
+        stroke="var(--rule-strong)"
+        strokeWidth="1.5"
+      />
+    );
   const bend = `C${x(node.parent) + 30} ${y(node.parent)} ${x(node) - 46} ${y(node)} ${x(node)} ${y(node)}`;
   return (
     <path

@@ -22,7 +22,7 @@ export function OpenDrafts() {
               {items.map((draft) => (
                 <li
                   key={draft.id}
-                  className="flex flex-wrap items-baseline gap-x-4 border-b border-rule py-1.5"
+                  className="flex min-h-9 flex-wrap items-center gap-x-4 border-b border-rule py-1"
                 >
                   <Link to={`/drafts/${draft.id}`} className="link font-medium">
                     {draft.designName}

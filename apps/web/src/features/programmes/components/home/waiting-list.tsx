@@ -9,7 +9,7 @@ import type { WaitingItem } from '../../lib/waiting.ts';
 
 function Item({ item }: { item: WaitingItem }) {
   return (
-    <li className="flex flex-wrap items-baseline gap-x-4 border-b border-rule border-l-2 border-l-accent py-1.5 pl-3">
+    <li className="flex min-h-9 flex-wrap items-center gap-x-4 border-b border-rule border-l-2 border-l-accent py-1 pl-3">
       <Link to={item.to} className="link font-medium">
         {item.task}: {item.subject}
       </Link>

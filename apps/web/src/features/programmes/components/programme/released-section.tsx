@@ -8,7 +8,7 @@ import { useReleases } from '../../api/list-releases.ts';
 
 function ReleaseLine({ release }: { release: ReleaseSummary }) {
   return (
-    <li className="flex flex-wrap items-baseline gap-x-4 gap-y-1 border-b border-rule py-1.5">
+    <li className="flex min-h-9 flex-wrap items-center gap-x-4 gap-y-1 border-b border-rule py-1">
       <Link to={`/releases/${release.id}`} className="link font-medium">
         Release {release.letter}: {release.designName} {release.versionLabel}
       </Link>

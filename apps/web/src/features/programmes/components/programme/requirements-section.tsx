@@ -43,7 +43,7 @@ function ResultCell({ requirement, result }: { requirement: Requirement; result:
   const { verdict, otherLimit } = found;
   return (
     <span className="inline-flex gap-3" title={verdict.reason}>
-      <span className="figures">{requirementValue(requirement.kind, verdict.value)}</span>
+      <span className="figures min-w-16 text-right">{requirementValue(requirement.kind, verdict.value)}</span>
       {otherLimit ? (
         <span className="text-look">other limit in issue {result.specificationIssue}</span>
       ) : (
@@ -63,7 +63,7 @@ export function RequirementsSection({ programme }: { programme: Programme }) {
         <p className="m-0 py-1 text-ink-soft">The specification sets no requirement.</p>
       ) : (
         <div role="region" aria-label="Requirements and results" tabIndex={0} className="overflow-x-auto">
-          <table className="w-full border-collapse text-left">
+          <table className="w-full max-w-5xl border-collapse text-left">
             <thead>
               <tr className="h-8 bg-panel">
                 <th scope="col" className="px-2 font-medium">

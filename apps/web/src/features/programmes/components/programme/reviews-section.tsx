@@ -16,7 +16,7 @@ const WORDS: Record<ReviewSummary['state'], string> = {
 function ReviewLine({ review }: { review: ReviewSummary }) {
   const { version } = review;
   return (
-    <li className="flex flex-wrap items-baseline gap-x-4 gap-y-1 border-b border-rule py-1.5">
+    <li className="flex min-h-9 flex-wrap items-center gap-x-4 gap-y-1 border-b border-rule py-1">
       <Link to={`/reviews/${review.id}`} className="link font-medium">
         {version.designName} {version.label}
       </Link>

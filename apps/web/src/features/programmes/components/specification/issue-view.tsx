@@ -37,8 +37,8 @@ const COLUMNS: Column<Requirement>[] = [
 
 function Words({ title, issue }: { title: string; issue: SpecificationIssue }) {
   const { control, windClass } = issue.specification;
-  if (title === 'Control') return <Figure label="Kind" value={CONTROL_WORDS[control]} />;
-  return title === 'Wind' ? <Figure label="IEC class" value={windClass} /> : null;
+  if (title === 'Control') return <Figure label="Kind" value={CONTROL_WORDS[control]} words />;
+  return title === 'Wind' ? <Figure label="IEC class" value={windClass} words /> : null;
 }
 
 /** One issue, read-only; what it changed from the issue before is said first and marked. */
@@ -52,29 +52,33 @@ export function IssueView({
   const changes = before === undefined ? [] : specificationChanges(before, issue);
   const changeOf = (label: string) => changes.find(({ what }) => what === label);
   return (
-    <>
-      {FIELD_GROUPS.map((group) => (
-        <Section key={group.title} title={group.title}>
-          <FigureRow>
-            <Words title={group.title} issue={issue} />
-            {group.fields.map((field) => {
-              const { label, unit } = SPECIFICATION_RULES[field];
-              const change = changeOf(label);
-              return (
-                <Figure
-                  key={field}
-                  label={label}
-                  unit={unit}
-                  value={shownNumber(issue.specification[field])}
-                  note={
-                    change === undefined ? undefined : <span className="text-look">was {change.before}</span>
-                  }
-                />
-              );
-            })}
-          </FigureRow>
-        </Section>
-      ))}
+    <div className="grid items-start gap-x-12 xl:grid-cols-2">
+      <div>
+        {FIELD_GROUPS.map((group) => (
+          <Section key={group.title} title={group.title}>
+            <FigureRow>
+              <Words title={group.title} issue={issue} />
+              {group.fields.map((field) => {
+                const { label, unit } = SPECIFICATION_RULES[field];
+                const change = changeOf(label);
+                return (
+                  <Figure
+                    key={field}
+                    label={label}
+                    unit={unit}
+                    value={shownNumber(issue.specification[field])}
+                    note={
+                      change === undefined ? undefined : (
+                        <span className="text-look">was {change.before}</span>
+                      )
+                    }
+                  />
+                );
+              })}
+            </FigureRow>
+          </Section>
+        ))}
+      </div>
       <Section title="Requirements">
         <DataTable
           label={`Requirements of issue ${String(issue.issue)}`}
@@ -84,6 +88,6 @@ export function IssueView({
           empty={<EmptyState title="This issue sets no requirement." />}
         />
       </Section>
-    </>
+    </div>
   );
 }

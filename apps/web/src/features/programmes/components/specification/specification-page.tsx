@@ -68,7 +68,7 @@ function Specification({
     setSearch(query);
   };
   return (
-    <div className="mx-auto max-w-5xl">
+    <div className={editing ? 'mx-auto max-w-5xl' : undefined}>
       <Header
         programme={programme}
         issue={issue}
