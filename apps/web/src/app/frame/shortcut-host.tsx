@@ -1,8 +1,11 @@
 import { Suspense, lazy, useEffect, useState } from 'react';
+import { STUDIO_KEYS } from '../../features/studio/lib/keys.ts';
 import { PALETTE_EVENT } from './open-palette.ts';
 
 const Palette = lazy(() => import('../../features/palette/components/palette.tsx'));
 const ShortcutList = lazy(() => import('../../features/palette/components/shortcut-list.tsx'));
+
+const KEY_GROUPS = [{ title: 'Studio', keys: STUDIO_KEYS }];
 
 /** Whether a key press belongs to something that is typed into. */
 function isTyping(target: EventTarget | null): boolean {
@@ -38,7 +41,7 @@ export function ShortcutHost(rights: { isAdministrator: boolean; canCreateProgra
   return (
     <Suspense fallback={null}>
       {open === 'palette' && <Palette onClose={close} {...rights} />}
-      {open === 'keys' && <ShortcutList onClose={close} />}
+      {open === 'keys' && <ShortcutList onClose={close} groups={KEY_GROUPS} />}
     </Suspense>
   );
 }

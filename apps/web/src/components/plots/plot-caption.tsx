@@ -78,11 +78,14 @@ export function PlotCaption({
       </span>
       <span className="ml-auto flex gap-3 overflow-hidden font-mono tabular-nums">
         {cursorX !== null &&
-          series.map((line) => (
-            <span key={line.id} title={line.label}>
-              <LineKey series={line} /> {formatQuantity(quantity, valueAt(line.points, cursorX))}
-            </span>
-          ))}
+          // What is in hand reads first: it is the last to be cut off where room is short.
+          series
+            .toSorted((a, b) => Number(b.kind === 'solid') - Number(a.kind === 'solid'))
+            .map((line) => (
+              <span key={line.id} title={line.label}>
+                <LineKey series={line} /> {formatQuantity(quantity, valueAt(line.points, cursorX))}
+              </span>
+            ))}
       </span>
       <span className="flex shrink-0 print:hidden">
         <PlotButton label={`Show ${title} as a table`} pressed={asTable} onClick={onTable}>

@@ -68,7 +68,7 @@ export function BladePreview({
   );
   return (
     <figure className="m-0" aria-label="Blade, root left, tip right">
-      <figcaption className="flex h-6 items-center justify-between overflow-hidden text-xs">
+      <figcaption className="flex min-h-6 flex-wrap items-center justify-between text-xs">
         <span className="font-medium">Blade</span>
         <ViewButtons
           view={view.orbited ? null : view.name}

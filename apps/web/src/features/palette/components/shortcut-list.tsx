@@ -1,6 +1,12 @@
 import { Dialog } from '../../../components/ui/dialog.tsx';
 
-const GROUPS: readonly { title: string; keys: readonly (readonly [string, string])[] }[] = [
+/** Keys of one part of the application, each with what it does. */
+export interface KeyGroup {
+  readonly title: string;
+  readonly keys: readonly (readonly [string, string])[];
+}
+
+const GROUPS: readonly KeyGroup[] = [
   {
     title: 'Everywhere',
     keys: [
@@ -13,29 +19,19 @@ const GROUPS: readonly { title: string; keys: readonly (readonly [string, string
     title: 'Lists',
     keys: [['↑ ↓', 'Row to row, in the same column of controls']],
   },
-  {
-    title: 'Plots',
-    keys: [
-      ['← →', 'Move the cursor'],
-      ['Home End', 'To the ends'],
-    ],
-  },
-  {
-    title: 'Station table',
-    keys: [
-      ['↑ ↓ ← →', 'Cell to cell; with Shift a range'],
-      ['Enter or F2', 'Edit the cell'],
-      ['Tab', 'Next cell'],
-      ['Ctrl C, Ctrl V', 'Copy to and paste from a spreadsheet'],
-      ['Ctrl Z, Ctrl Y', 'Undo, redo'],
-    ],
-  },
 ];
 
-export default function ShortcutList({ onClose }: { onClose: () => void }) {
+/** Every key there is; features bring theirs as `groups`. */
+export default function ShortcutList({
+  onClose,
+  groups,
+}: {
+  onClose: () => void;
+  groups: readonly KeyGroup[];
+}) {
   return (
     <Dialog open onOpenChange={onClose} title="Keys">
-      {GROUPS.map((group) => (
+      {[...GROUPS, ...groups].map((group) => (
         <section key={group.title}>
           <h3 className="m-0 mb-1 text-[13px] font-medium text-ink-soft">{group.title}</h3>
           <dl className="m-0 grid grid-cols-[9rem_1fr] gap-y-1">

@@ -40,7 +40,7 @@ export function AirfoilSettings({
   };
   return (
     <section aria-label="Airfoils of the design">
-      <h3 className="m-0 mb-1 text-sm font-medium">Airfoils of the design</h3>
+      <h2 className="m-0 mb-1 text-sm font-medium">Airfoils of the design</h2>
       <table className="w-full border-collapse text-[13px]">
         <thead className="text-left text-xs text-ink-soft">
           <tr>

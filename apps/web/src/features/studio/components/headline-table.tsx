@@ -1,4 +1,5 @@
 import { classNames } from '../../../components/ui/class-names.ts';
+import { SET_BACK } from './pending.tsx';
 import type { HeadlineNumber } from '../lib/headline-numbers.ts';
 
 /** The few numbers an edit is judged by, each beside what it was. */
@@ -37,21 +38,18 @@ export function HeadlineTable({
               <td
                 data-current={row.current}
                 title={row.value === '–' ? 'Not solved yet, or without a solution' : undefined}
-                className={classNames(
-                  'figures text-right text-[13px] font-medium',
-                  !row.current && 'opacity-45',
-                )}
+                className={classNames('figures text-right text-[13px] font-medium', !row.current && SET_BACK)}
               >
                 {row.value}
                 {!row.current && <span className="sr-only"> (solving)</span>}
               </td>
-              <td className={classNames('figures pl-3 text-right text-[13px]', !row.current && 'opacity-45')}>
+              <td className={classNames('figures pl-3 text-right text-[13px]', !row.current && SET_BACK)}>
                 {row.difference}
               </td>
               <td
                 className={classNames(
                   'figures w-[76px] text-right text-xs text-ink-soft',
-                  !row.current && 'opacity-45',
+                  !row.current && SET_BACK,
                 )}
               >
                 {row.share}

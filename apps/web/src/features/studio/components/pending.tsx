@@ -1,14 +1,33 @@
 import type { ReactNode } from 'react';
 import { classNames } from '../../../components/ui/class-names.ts';
 
-/** Dims what does not answer the content in hand, so that it is never taken for current. */
-export function Pending({ current, children }: { current: boolean; children: ReactNode }) {
+/**
+ * How a result that does not answer the content in hand is set back: lines and dots faint, figures in soft italics. Text
+ * keeps its contrast, so that it can still be read.
+ */
+export const SET_BACK = 'italic text-ink-soft';
+const SET_BACK_INSIDE =
+  '[&_circle]:opacity-35 [&_path[data-series]]:opacity-35 [&_[data-figure]]:text-ink-soft [&_[data-figure]]:italic';
+
+/** Sets back what does not answer the content in hand, so that it is never taken for current, and says why. */
+export function Pending({
+  current,
+  reason,
+  children,
+}: {
+  current: boolean;
+  /** 'solving …', or why the draft cannot be solved. */
+  reason: string;
+  children: ReactNode;
+}) {
   return (
-    <div
-      data-current={current}
-      className={classNames('transition-opacity duration-100', !current && 'opacity-45')}
-    >
+    <div data-current={current} className={classNames('relative', !current && SET_BACK_INSIDE)}>
       {children}
+      {!current && (
+        <span className="pointer-events-none absolute top-7 right-16 z-10 animate-appear border border-rule bg-paper px-1.5 text-xs text-ink-soft">
+          {reason}
+        </span>
+      )}
     </div>
   );
 }

@@ -25,6 +25,8 @@ export interface RotorColumnProps {
   readonly designTipSpeedRatio: number;
   readonly stationRadiiM: readonly number[];
   readonly cursors: CursorStore;
+  /** What is said over results that are not current. */
+  readonly pendingReason: string;
 }
 
 const COEFFICIENTS: Record<RotorCoefficient, { title: string; short: string }> = {
@@ -103,11 +105,21 @@ function RotorCurve({
 
 /** What the rotor does: Cp over λ, the numbers an edit is judged by, the verdicts and the warnings. */
 export function RotorColumn(props: RotorColumnProps) {
-  const { live, evaluation, reference, numbers, unlike, warnings, designTipSpeedRatio, cursors } = props;
+  const {
+    live,
+    evaluation,
+    reference,
+    numbers,
+    unlike,
+    warnings,
+    designTipSpeedRatio,
+    cursors,
+    pendingReason,
+  } = props;
   return (
     <section aria-label="Rotor" className="flex min-h-0 min-w-0 flex-col gap-2">
       {live.output !== null && (
-        <Pending current={live.current}>
+        <Pending current={live.current} reason={pendingReason}>
           <RotorCurve
             live={live.output}
             reference={reference}
@@ -118,10 +130,11 @@ export function RotorColumn(props: RotorColumnProps) {
       )}
       <HeadlineTable numbers={numbers} referenceLabel={reference?.label ?? null} unlike={unlike} />
       <div className="min-h-32 flex-1 overflow-auto">
-        <VerdictTable evaluation={evaluation} cursors={cursors} />
+        <VerdictTable evaluation={evaluation} pendingReason={pendingReason} cursors={cursors} />
         <WarningList
           warnings={warnings}
           current={live.current}
+          pendingReason={pendingReason}
           stationRadiiM={props.stationRadiiM}
           cursors={cursors}
         />

@@ -27,6 +27,8 @@ export interface SpanColumnProps {
   readonly referenceSurface: BladeSurface | null;
   readonly limits: { readonly chord: readonly PlotLimit[] };
   readonly cursors: CursorStore;
+  /** What is said over results that are not current. */
+  readonly pendingReason: string;
 }
 
 const NO_LIMITS: readonly PlotLimit[] = [];
@@ -130,8 +132,18 @@ function Preview({
 
 /** Everything spanwise on one pixel axis: the blade, chord, twist and two plots of choice. */
 export function SpanColumn(props: SpanColumnProps) {
-  const { specification, content, airfoils, live, current, reference, referenceSurface, limits, cursors } =
-    props;
+  const {
+    specification,
+    content,
+    airfoils,
+    live,
+    current,
+    reference,
+    referenceSurface,
+    limits,
+    cursors,
+    pendingReason,
+  } = props;
   const [choice, setChoice] = useState(readPlotChoice);
   const surface = useMemo(() => surfaceOf(content, airfoils), [content, airfoils]);
   const chordDots = useMemo(() => content?.stations.map((s) => [s.radiusM, s.chordM] as const), [content]);
@@ -149,7 +161,7 @@ export function SpanColumn(props: SpanColumnProps) {
           <Preview content={content} surface={surface} reference={referenceSurface} cursors={cursors} />
         )}
         {live !== null && (
-          <Pending current={current}>
+          <Pending current={current} reason={pendingReason}>
             <Plot {...shared} live={live} quantity={CHORD} stations={chordDots} limits={limits.chord} />
             <Plot {...shared} live={live} quantity={TWIST} stations={twistDots} />
             {choice.map((id, slot) => {

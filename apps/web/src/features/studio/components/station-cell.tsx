@@ -68,6 +68,7 @@ export function StationCell({
   selected,
   fault,
   changed,
+  nearCursor,
   editing,
 }: {
   id: string;
@@ -80,6 +81,8 @@ export function StationCell({
   fault: string | undefined;
   /** Differs from the reference. */
   changed: boolean;
+  /** The span cursor stands at this station; marked on its first cell. */
+  nearCursor: boolean;
   editing: CellEditing | null;
 }) {
   const first = columnIndex === 0;
@@ -101,6 +104,7 @@ export function StationCell({
         fault !== undefined && 'text-fails underline decoration-wavy decoration-1 underline-offset-2',
         station[column.field] === null && 'text-ink-soft',
         changed && 'font-semibold',
+        nearCursor && 'shadow-[inset_4px_0_0_var(--ink)]',
         active && 'outline-2 -outline-offset-2 outline-accent',
       )}
     >

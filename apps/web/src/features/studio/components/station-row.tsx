@@ -33,11 +33,7 @@ export const StationRow = memo(
     const text = notesText(notes);
     const failing = notes !== undefined && Object.keys(notes.faults).length > 0;
     return (
-      <tr
-        role="row"
-        aria-rowindex={row + 2}
-        className={props.nearCursor ? 'shadow-[inset_3px_0_0_var(--ink)]' : undefined}
-      >
+      <tr role="row" aria-rowindex={row + 2}>
         {STATION_COLUMNS.map((column, index) => (
           <StationCell
             key={column.field}
@@ -50,6 +46,7 @@ export const StationRow = memo(
             selected={index >= selectedFrom && index <= selectedTo}
             fault={notes?.faults[column.field]}
             changed={reference !== undefined && reference[column.field] !== station[column.field]}
+            nearCursor={index === 0 && props.nearCursor}
             editing={index === activeColumn ? editing : null}
           />
         ))}

@@ -113,6 +113,8 @@ function Results({ model, issue }: { model: Model; issue: SpecificationIssue }) 
   const specification: Specification = issue.specification;
   const limits = useMemo(() => ({ chord: chordLimits(issue) }), [issue]);
   const stations = checked.lastValid?.stations;
+  const pendingReason =
+    checked.faults.length > 0 ? 'earlier result: the draft has faults' : (solver.live.error ?? 'solving …');
   const radii = useMemo(() => (stations ?? []).map((station) => station.radiusM), [stations]);
   return (
     <>
@@ -126,6 +128,7 @@ function Results({ model, issue }: { model: Model; issue: SpecificationIssue }) 
         referenceSurface={model.reference.surface}
         limits={limits}
         cursors={cursors}
+        pendingReason={pendingReason}
       />
       <RotorColumn
         live={solver.live}
@@ -137,6 +140,7 @@ function Results({ model, issue }: { model: Model; issue: SpecificationIssue }) 
         designTipSpeedRatio={model.designRatio}
         stationRadiiM={radii}
         cursors={cursors}
+        pendingReason={pendingReason}
       />
     </>
   );

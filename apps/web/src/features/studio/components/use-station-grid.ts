@@ -67,6 +67,7 @@ export function useStationGrid(
   const bounds = boundsOf(range);
 
   const select = useCallback((place: GridPlace, extend = false) => {
+    setNotice('');
     setRange((before) => ({ anchor: extend ? before.anchor : place, focus: place }));
   }, []);
   const change = (label: string, edited: (content: DraftContent) => DraftContent) => {
@@ -144,6 +145,7 @@ export function useStationGrid(
     }
     leaving.current = false;
     event.preventDefault();
+    setNotice('');
     if (command.kind === 'move') setRange(moveRange(range, command, rowCount, command.extend));
     else if (command.kind === 'type') startEdit(command.text);
     else actions[command.kind]();

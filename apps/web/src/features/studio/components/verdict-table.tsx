@@ -1,5 +1,6 @@
 import type { Evaluation } from '@tipward/contract';
 import { useMemo } from 'react';
+import { classNames } from '../../../components/ui/class-names.ts';
 import { VerdictCounts } from '../../../components/ui/verdict-counts.tsx';
 import { VerdictMark } from '../../../components/ui/verdict-mark.tsx';
 import type { Latest } from '../../../lib/solver/use-latest.ts';
@@ -34,14 +35,20 @@ function Row({ row, cursors }: { row: VerdictRow; cursors: CursorStore }) {
     <tr className="border-t border-rule align-baseline">
       <th scope="row" className="text-left text-[13px] leading-4 font-normal" title={verdict.reason}>
         {verdict.label}
-        {verdict.unit !== '' && <span className="text-ink-soft">, {verdict.unit}</span>}
+        {verdict.unit !== '' && <span className="text-ink-soft">{`,\u00a0${verdict.unit}`}</span>}
       </th>
       <td className="text-xs">
         <VerdictMark verdict={verdict.verdict} />
       </td>
-      <td className="figures text-right text-[13px]">{value}</td>
-      <td className="figures text-right text-xs whitespace-nowrap text-ink-soft">{limit}</td>
-      <td className="figures text-right text-xs">{margin}</td>
+      <td data-figure className="figures text-right text-[13px]">
+        {value}
+      </td>
+      <td data-figure className="figures text-right text-xs whitespace-nowrap text-ink-soft">
+        {limit}
+      </td>
+      <td data-figure className="figures text-right text-xs max-sm:hidden">
+        {margin}
+      </td>
       <td className="text-right">{place !== null && <PlaceButton place={place} cursors={cursors} />}</td>
     </tr>
   );
@@ -50,9 +57,11 @@ function Row({ row, cursors }: { row: VerdictRow; cursors: CursorStore }) {
 /** Every requirement held against the draft: value, limit, margin and where it governs. */
 export function VerdictTable({
   evaluation,
+  pendingReason,
   cursors,
 }: {
   evaluation: Latest<Evaluation>;
+  pendingReason: string;
   cursors: CursorStore;
 }) {
   const { output, current, error } = evaluation;
@@ -64,11 +73,10 @@ export function VerdictTable({
         <span className="text-xs font-normal">
           {output !== null && <VerdictCounts verdicts={output.verdicts} />}
         </span>
-        {!current && error === null && <span className="text-xs font-normal text-ink-soft">solving …</span>}
       </h2>
       {error !== null && <p className="m-0 text-xs text-fails">Not evaluated: {error}</p>}
       {rows.length > 0 && (
-        <Pending current={current}>
+        <Pending current={current} reason={pendingReason}>
           <table className="w-full border-collapse [&_td]:pl-2">
             <thead className="text-xs text-ink-soft">
               <tr>
@@ -79,7 +87,11 @@ export function VerdictTable({
                   Verdict
                 </th>
                 {['Value', 'Limit', 'Margin', 'At'].map((title) => (
-                  <th key={title} scope="col" className="text-right font-normal">
+                  <th
+                    key={title}
+                    scope="col"
+                    className={classNames('text-right font-normal', title === 'Margin' && 'max-sm:hidden')}
+                  >
                     {title}
                   </th>
                 ))}

@@ -6,11 +6,13 @@ import { Pending } from './pending.tsx';
 export function WarningList({
   warnings,
   current,
+  pendingReason,
   stationRadiiM,
   cursors,
 }: {
   warnings: readonly Warning[];
   current: boolean;
+  pendingReason: string;
   stationRadiiM: readonly number[];
   cursors: CursorStore;
 }) {
@@ -19,7 +21,7 @@ export function WarningList({
       <h2 className="m-0 text-sm font-medium">
         Warnings <span className="figures text-xs font-normal text-ink-soft">{warnings.length}</span>
       </h2>
-      <Pending current={current}>
+      <Pending current={current} reason={pendingReason}>
         {warnings.length === 0 ? (
           <p className="m-0 text-xs text-ink-soft">None.</p>
         ) : (
