@@ -1,55 +1,39 @@
-import { join } from 'node:path';
-import { createChildren } from './processes/children.mjs';
-import { freePort } from './processes/ports.mjs';
-import { mustRun } from './processes/run.mjs';
-import { ownerEnvironment, serverEnvironment } from './setup/environment.mjs';
-import { runMain } from './setup/fail.mjs';
+import { freePort, readPort, requirePort } from './processes/ports.mjs';
+import { runMain } from './processes/run-main.mjs';
+import { createServices } from './processes/services.mjs';
+import { waitHealthy } from './processes/wait-healthy.mjs';
+import { claimLocal } from './setup/claim.mjs';
+import { makeDemo } from './setup/demo.mjs';
+import { serverEnvironment } from './setup/environment.mjs';
 import { installPackages } from './setup/install.mjs';
-import { openLocalDatabase } from './setup/local-database.mjs';
-import { checkNode } from './setup/node-version.mjs';
-import { ROOT } from './setup/paths.mjs';
+import { noteDemoIsWhole, openLocalDatabase } from './setup/local-database.mjs';
+import { WATCHED } from './setup/programs.mjs';
 
-const API_PORT = 4310;
-const SOURCE = ['--conditions=@tipward/source', '--import', 'tsx'];
+const URL_OF_WEB = 'http://127.0.0.1:5173';
 
 /** Hot reload: API and worker from their sources under watch, the web app by Vite with a proxy to the API. */
 async function main() {
-  checkNode();
+  const port = readPort('TIPWARD_PORT', process.env.TIPWARD_PORT, 4310);
+  const note = await claimLocal();
+  await requirePort(port, 'npm run dev');
   await installPackages();
-  const { cluster, database, secrets } = await openLocalDatabase();
-  const children = createChildren(() => cluster.stop());
+  const { database, secrets } = await openLocalDatabase();
+  const mailPort = await freePort();
   const environment = {
-    ...serverEnvironment({
-      port: API_PORT,
-      mailPort: await freePort(),
-      database,
-      secret: secrets.session,
-      mode: 'demo',
-    }),
-    TIPWARD_PUBLIC_URL: 'http://127.0.0.1:5173',
+    ...serverEnvironment({ port, mailPort, database, secret: secrets.session, mode: 'demo' }),
+    NODE_ENV: 'development',
+    TIPWARD_PUBLIC_URL: URL_OF_WEB,
   };
-  const owner = ownerEnvironment(environment, database);
-  await mustRun(process.execPath, [...SOURCE, join(ROOT, 'apps/api/src/commands/migrate.ts')], {
-    env: owner,
-    cwd: join(ROOT, 'apps/api'),
-  });
-  console.log(
-    await mustRun(process.execPath, [...SOURCE, join(ROOT, 'seeds/src/seed-demo.ts')], {
-      env: owner,
-      cwd: join(ROOT, 'seeds'),
-    }),
-  );
-  const watch = (name, file) =>
-    children.start(name, process.execPath, ['--watch', ...SOURCE, file], environment, join(ROOT, 'apps/api'));
-  watch('The server', 'src/server.ts');
-  watch('The worker', 'src/worker.ts');
-  children.start(
-    'The web app',
-    join(ROOT, 'apps/web/node_modules/.bin/vite'),
-    ['--host', '127.0.0.1', '--port', '5173', '--strictPort'],
-    environment,
-    join(ROOT, 'apps/web'),
-  );
+  const signIns = await makeDemo(WATCHED, environment, database);
+  noteDemoIsWhole();
+  const services = createServices();
+  services.start('The server', WATCHED.server, environment);
+  services.start('The worker', WATCHED.worker, environment);
+  services.start('The web application', WATCHED.web, environment);
+  note({ url: URL_OF_WEB, services: services.pids() });
+  await Promise.race([waitHealthy(`http://127.0.0.1:${port}`), services.untilOneEnds()]);
+  console.log(`\nTipward with hot reload is at ${URL_OF_WEB}\n\n${signIns}\n\nCtrl-C stops everything.`);
+  await services.untilOneEnds();
 }
 
-await runMain(main);
+await runMain(main, { interruptedCode: 0 });

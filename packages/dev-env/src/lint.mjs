@@ -1,5 +1,10 @@
 import { runChecks } from './checks/run-checks.mjs';
 import { LINTERS } from './checks/steps.mjs';
-import { runMain } from './setup/fail.mjs';
+import { runMain } from './processes/run-main.mjs';
+import { installPackages } from './setup/install.mjs';
 
-await runMain(() => runChecks(LINTERS));
+await runMain(async () => {
+  await installPackages();
+  const { failed } = await runChecks(LINTERS);
+  if (failed > 0) process.exitCode = 1;
+});

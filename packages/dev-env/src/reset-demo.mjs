@@ -1,32 +1,22 @@
-import { join } from 'node:path';
-import { dropDatabase } from './postgres/database.mjs';
-import { mustRun } from './processes/run.mjs';
+import { runMain } from './processes/run-main.mjs';
 import { buildAll } from './setup/build.mjs';
-import { ownerEnvironment, serverEnvironment } from './setup/environment.mjs';
-import { SetupError, runMain } from './setup/fail.mjs';
+import { claimLocal } from './setup/claim.mjs';
+import { makeDemo } from './setup/demo.mjs';
+import { serverEnvironment } from './setup/environment.mjs';
 import { installPackages } from './setup/install.mjs';
-import { LOCAL_DATABASE, openLocalDatabase } from './setup/local-database.mjs';
-import { ROOT } from './setup/paths.mjs';
+import { noteDemoIsWhole, openLocalDatabase } from './setup/local-database.mjs';
+import { BUILT } from './setup/programs.mjs';
 
-/** Drops the local database and seeds the demo anew. Refuses while the product runs on it. */
+/** Drops the local database and makes the demo anew. Refuses while the product runs on it. */
 await runMain(async () => {
+  await claimLocal();
   await installPackages();
   await buildAll();
-  const first = await openLocalDatabase();
-  if (first.cluster.wasRunning)
-    throw new SetupError(
-      'Tipward is running on this database. Stop it (Ctrl-C), then run the command again.',
-    );
-  try {
-    await dropDatabase(first.bin, first.cluster, LOCAL_DATABASE);
-    const { database, secrets } = await openLocalDatabase();
-    const owner = ownerEnvironment(
-      serverEnvironment({ port: 4310, mailPort: 1, database, secret: secrets.session, mode: 'demo' }),
-      database,
-    );
-    await mustRun(process.execPath, [join(ROOT, 'apps/api/dist/commands/migrate.js')], { env: owner });
-    console.log(await mustRun(process.execPath, [join(ROOT, 'seeds/dist/seed-demo.js')], { env: owner }));
-  } finally {
-    await first.cluster.stop();
-  }
+  const { database, secrets } = await openLocalDatabase({ anew: true });
+  // Nothing listens here: the seeds serve themselves on a port of their own, and mail waits for the worker.
+  const ports = { port: 4310, mailPort: 4125 };
+  const environment = serverEnvironment({ ...ports, database, secret: secrets.session, mode: 'demo' });
+  const signIns = await makeDemo(BUILT, environment, database);
+  noteDemoIsWhole();
+  console.log(`\nThe demo is as on the first day; npm start serves it.\n\n${signIns}`);
 });

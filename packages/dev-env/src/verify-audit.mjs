@@ -1,18 +1,19 @@
-import { join } from 'node:path';
 import { run } from './processes/run.mjs';
-import { runMain } from './setup/fail.mjs';
-import { openLocalDatabase } from './setup/local-database.mjs';
-import { ROOT } from './setup/paths.mjs';
+import { runMain } from './processes/run-main.mjs';
+import { buildAll } from './setup/build.mjs';
+import { claimLocal, claimant } from './setup/claim.mjs';
+import { installPackages } from './setup/install.mjs';
+import { openExistingDatabase } from './setup/local-database.mjs';
+import { BUILT } from './setup/programs.mjs';
 
-/** Walks the audit chain of the local database; PostgreSQL is started for it where it is not running. */
+/** Walks the audit chain of the local database, beside the running product or with PostgreSQL started for it. */
 await runMain(async () => {
-  const { cluster, database } = await openLocalDatabase();
-  try {
-    const { code } = await run(process.execPath, [join(ROOT, 'apps/api/dist/commands/verify-audit.js')], {
-      env: { ...process.env, DATABASE_URL: database.appUrl },
-    });
-    process.exitCode = code;
-  } finally {
-    if (!cluster.wasRunning) await cluster.stop();
-  }
+  const beside = claimant() !== null;
+  if (!beside) await claimLocal();
+  await installPackages();
+  await buildAll();
+  const { appUrl } = await openExistingDatabase({ leaveRunning: beside });
+  const { command, args, cwd } = BUILT.verifyAudit;
+  const { code } = await run(command, args, { cwd, env: { ...process.env, DATABASE_URL: appUrl } });
+  process.exitCode = code;
 });

@@ -1,21 +1,17 @@
 import { run } from '../processes/run.mjs';
 import { ROOT } from '../setup/paths.mjs';
 
-/** Runs every step even after one failed; prints what each took. Sets the exit code and returns the counts. */
-export async function runChecks(steps, env = process.env) {
+const secondsSince = (start) => `${((Date.now() - start) / 1000).toFixed(1)} s`;
+
+/** Runs every check even after one failed, prints what each took and returns { passed, failed }. */
+export async function runChecks(checks) {
   const counts = { passed: 0, failed: 0 };
-  for (const { name, command, args } of steps) {
+  for (const { name, command, args } of checks) {
     const start = Date.now();
-    const { code, output } = await run(command, args, { cwd: ROOT, env, quiet: true });
-    const took = `${((Date.now() - start) / 1000).toFixed(1)} s`;
-    if (code === 0) {
-      counts.passed += 1;
-      console.log(`ok    ${name} (${took})`);
-    } else {
-      counts.failed += 1;
-      process.exitCode = 1;
-      console.log(`FAIL  ${name} (${took})\n${output.trim()}\n`);
-    }
+    const { code, output } = await run(command, args, { cwd: ROOT, quiet: true });
+    counts[code === 0 ? 'passed' : 'failed'] += 1;
+    if (code === 0) console.log(`ok    ${name} (${secondsSince(start)})`);
+    else console.log(`FAIL  ${name} (${secondsSince(start)})\n${output.trim()}\n`);
   }
   return counts;
 }

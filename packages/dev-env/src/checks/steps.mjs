@@ -1,7 +1,5 @@
 import { join } from 'node:path';
-import { ROOT } from '../setup/paths.mjs';
-
-const bin = (name) => join(ROOT, 'node_modules/.bin', name);
+import { bin } from '../setup/paths.mjs';
 
 /** Checks of the source; each counts as one in the closing line of `npm test`. */
 export const LINTERS = [

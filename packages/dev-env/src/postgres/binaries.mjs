@@ -1,6 +1,7 @@
-import { existsSync, readdirSync } from 'node:fs';
+import { existsSync, readFileSync, readdirSync } from 'node:fs';
 import { join } from 'node:path';
 import { installDebian } from '../setup/debian.mjs';
+import { SetupError } from '../setup/fail.mjs';
 
 const HOME = '/usr/lib/postgresql';
 
@@ -20,4 +21,17 @@ export async function ensureBinaries() {
   const installed = findBinaries();
   if (installed === null) throw new Error(`${HOME} holds no server programs after the installation`);
   return installed;
+}
+
+/** Data can only be served by the major version that made them: `bin` of that version, beside the newest one. */
+export function binariesFor(dataDir, newest) {
+  const file = join(dataDir, 'PG_VERSION');
+  if (!existsSync(file)) return newest;
+  const version = readFileSync(file, 'utf8').trim();
+  const bin = join(newest, '../..', version, 'bin');
+  if (existsSync(join(bin, 'postgres'))) return bin;
+  throw new SetupError(
+    `The data in ${dataDir} were made by PostgreSQL ${version}, which is no longer installed. ` +
+      `Install postgresql-${version}, or remove that folder to start with an empty demo.`,
+  );
 }

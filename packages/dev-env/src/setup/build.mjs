@@ -6,41 +6,34 @@ import { PNPM } from './install.mjs';
 import { LOCAL, ROOT } from './paths.mjs';
 
 const SKIPPED = new Set(['node_modules', 'dist', '.local', '.git', 'test-results', 'playwright-report']);
+const SOURCES = ['packages', 'apps', 'seeds', 'pnpm-lock.yaml', 'tsconfig.base.json'];
+const RESULTS = ['apps/web/dist/index.html', 'apps/api/dist/server.js', 'seeds/dist/seed-demo.js'];
 
-/** Name, size and time of every source file: equal text means nothing was touched since. */
-export function sourceStamp(folders, root = ROOT) {
+/** Name, size and time of every file below `places`: equal text means nothing was touched since. */
+export function sourceStamp(places, root = ROOT) {
   const hash = createHash('sha256');
-  const walk = (folder) => {
-    for (const entry of readdirSync(folder, { withFileTypes: true }).sort((a, b) =>
-      a.name < b.name ? -1 : 1,
-    )) {
-      if (SKIPPED.has(entry.name)) continue;
-      const path = join(folder, entry.name);
-      if (entry.isDirectory()) walk(path);
-      else if (entry.isFile()) {
-        const { size, mtimeMs } = statSync(path);
-        hash.update(`${path.slice(root.length)}\0${size}\0${mtimeMs}\n`);
-      }
+  const walk = (path) => {
+    const facts = statSync(path);
+    if (!facts.isDirectory()) {
+      hash.update(`${path.slice(root.length)}\0${facts.size}\0${facts.mtimeMs}\n`);
+      return;
     }
+    for (const entry of readdirSync(path, { withFileTypes: true }).sort((a, b) => (a.name < b.name ? -1 : 1)))
+      if (!SKIPPED.has(entry.name) && (entry.isDirectory() || entry.isFile())) walk(join(path, entry.name));
   };
-  for (const folder of folders) walk(join(root, folder));
+  for (const place of places) walk(join(root, place));
   return hash.digest('hex');
 }
 
 /** Builds packages, API, web and seeds in the order of their dependencies, unless nothing changed since the last build. */
 export async function buildAll() {
   const stampFile = join(LOCAL, 'built');
-  const wanted =
-    sourceStamp(['packages', 'apps', 'seeds']) + readFileSync(join(ROOT, 'pnpm-lock.yaml')).length;
-  const have =
-    existsSync(join(ROOT, 'apps/web/dist/index.html')) && existsSync(join(ROOT, 'apps/api/dist/server.js'));
+  const wanted = sourceStamp(SOURCES);
+  const have = RESULTS.every((file) => existsSync(join(ROOT, file)));
   if (have && existsSync(stampFile) && readFileSync(stampFile, 'utf8') === wanted) return;
   console.log('Building …');
-  await mustRun(
-    'npx',
-    [...PNPM, '-r', '--reporter=append-only', '--workspace-concurrency=2', 'run', 'build'],
-    { cwd: ROOT },
-  );
+  const args = ['-r', '--reporter=append-only', '--workspace-concurrency=2', 'run', 'build'];
+  await mustRun('npx', [...PNPM, ...args], { cwd: ROOT });
   mkdirSync(LOCAL, { recursive: true });
   writeFileSync(stampFile, wanted);
 }

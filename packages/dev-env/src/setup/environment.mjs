@@ -1,13 +1,14 @@
 import { join } from 'node:path';
 import { ROOT } from './paths.mjs';
 
-/** What server, worker and commands read from their environment. */
+/** What server, worker and commands read from their environment. Loopback only: the demo's passwords are public. */
 export function serverEnvironment({ port, mailPort, database, secret, mode }) {
   return {
     ...process.env,
     NODE_ENV: mode === 'test' ? 'test' : 'production',
     TIPWARD_MODE: mode,
     TIPWARD_LOG_LEVEL: process.env.TIPWARD_LOG_LEVEL ?? 'warn',
+    TIPWARD_HOST: '127.0.0.1',
     TIPWARD_PORT: String(port),
     TIPWARD_PUBLIC_URL: `http://127.0.0.1:${port}`,
     TIPWARD_SECRET: secret,

@@ -1,23 +1,15 @@
 /** An error whose message already says what to do; shown without a stack. */
 export class SetupError extends Error {}
 
-/** Runs a script's main function: set-up errors are printed plainly, others with their stack; exit code 1. */
-export async function runMain(main) {
-  try {
-    await main();
-  } catch (error) {
-    console.error(error instanceof SetupError ? `\n${error.message}` : error);
-    process.exitCode = 1;
-  }
-}
+export const FULL_DISK = 'The disk is full: free some space and run the command again.';
 
-/** Turns an operating-system error into words where there is something a person can do. */
-export function explain(error, doing) {
-  if (error?.code === 'ENOSPC')
-    return new SetupError(`The disk is full while ${doing}. Free some space and run the command again.`);
+/** Turns an operating-system error into words where there is something a person can do; other errors stay as they are. */
+export function explain(error) {
+  if (error?.code === 'ENOSPC') return new SetupError(`${error.message}\n${FULL_DISK}`);
   if (error?.code === 'EACCES' || error?.code === 'EPERM')
     return new SetupError(
-      `No right to write while ${doing}: ${error.path ?? error.message}. Give this user the folder, or run as its owner.`,
+      `This user has no right to ${error.syscall ?? 'use'} ${error.path ?? error.message}. ` +
+        'Run the command as the owner of that file or folder, or give it to this user.',
     );
   return error;
 }

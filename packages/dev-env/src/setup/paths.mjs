@@ -6,5 +6,12 @@ import { dirname, join, resolve } from 'node:path';
 export const ROOT = resolve(dirname(fileURLToPath(import.meta.url)), '../../../..');
 export const LOCAL = join(ROOT, '.local');
 
-/** Short name of this checkout, for places outside it (socket folders, data that the postgres user must reach). */
-export const CHECKOUT_ID = createHash('sha256').update(ROOT).digest('hex').slice(0, 10);
+/** Data of a checkout that the postgres user cannot reach, such as one below root's home, go here instead. */
+const CHECKOUT_ID = createHash('sha256').update(ROOT).digest('hex').slice(0, 10);
+export const OUTSIDE = `/var/lib/tipward-${CHECKOUT_ID}`;
+
+/** Not the TMPDIR of this user: socket paths must stay short and the postgres user must get there. */
+export const TEMPORARY = '/tmp';
+
+/** The programs that packages bring to the root. */
+export const bin = (name) => join(ROOT, 'node_modules/.bin', name);
