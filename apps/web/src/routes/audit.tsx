@@ -1,1 +1,10 @@
-export { AuditPage as Component } from '../features/audit/components/audit-page.tsx';
+import { AdministratorsOnly } from '../components/ui/administrators-only.tsx';
+import { AuditPage } from '../features/audit/components/audit-page.tsx';
+
+export function Component() {
+  return (
+    <AdministratorsOnly>
+      <AuditPage />
+    </AdministratorsOnly>
+  );
+}

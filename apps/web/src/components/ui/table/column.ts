@@ -13,6 +13,8 @@ export interface Column<Row> {
   readonly text?: (row: Row) => CsvCell;
   /** Figures: right-aligned, tabular. */
   readonly numeric?: boolean;
+  /** Takes the width the others leave, cut short on one line. */
+  readonly fill?: boolean;
   /** Left out on a phone. */
   readonly wideOnly?: boolean;
 }

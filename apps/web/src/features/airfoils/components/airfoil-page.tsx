@@ -30,6 +30,9 @@ export function AirfoilPage({ airfoilId }: { airfoilId: string }) {
               </>
             }
           />
+          <Section title="Polars">
+            <PolarTable airfoil={data} />
+          </Section>
           <div className="grid gap-x-10 xl:grid-cols-[minmax(0,2fr)_minmax(0,3fr)]">
             <Section title="Outline">
               <OutlinePlot airfoil={data} />
@@ -38,9 +41,6 @@ export function AirfoilPage({ airfoilId }: { airfoilId: string }) {
               <PolarPlots airfoil={data} />
             </Section>
           </div>
-          <Section title="Polars">
-            <PolarTable airfoil={data} />
-          </Section>
         </>
       )}
     </Loaded>

@@ -52,11 +52,8 @@ const COLUMNS: Column<AirfoilSummary>[] = [
     id: 'note',
     header: 'Note',
     wideOnly: true,
-    cell: ({ note }) => (
-      <span className="line-clamp-1 max-w-[60ch] wrap-anywhere" title={note}>
-        {note}
-      </span>
-    ),
+    fill: true,
+    cell: ({ note }) => <span title={note}>{note}</span>,
     text: ({ note }) => note,
   },
   {

@@ -6,7 +6,7 @@ import { Select } from '../../../components/ui/select.tsx';
 import { polarSeries } from '../lib/polar-series.ts';
 
 const RANGES = {
-  working: { label: 'working range, −10° to 25°', domain: [-10, 25] },
+  working: { label: 'working range, −10° to 20°', domain: [-10, 20] },
   whole: { label: 'whole circle, −180° to 180°', domain: [-180, 180] },
 } as const;
 type Range = keyof typeof RANGES;

@@ -59,11 +59,8 @@ const ABOUT: Column<VersionSummary>[] = [
   {
     id: 'note',
     header: 'Note',
-    cell: ({ note }) => (
-      <span className="block max-w-64 truncate" title={note}>
-        {note}
-      </span>
-    ),
+    fill: true,
+    cell: ({ note }) => <span title={note}>{note}</span>,
     text: ({ note }) => note,
   },
   {
