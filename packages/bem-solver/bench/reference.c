@@ -211,7 +211,8 @@ static int try_cell(const Element *el, const Branch *b, int cell, double lambda)
     for (int count = 0; count < 120; count += 1) {
         evaluate(el, phi, &rec);
         double g = lambda * rec.D - rec.N, step = -g / (lambda * rec.dD - rec.dN), next = phi + step;
-        if ((fabs(step) <= 2e-8 && next >= rec.from && next <= rec.to) || fabs(step) <= 4e-16 * (fabs(phi) + 1e-3)) {
+        int small = fabs(step) * (fabs(rec.dD * rec.s) + fabs(rec.D)) <= 3e-6 * fabs(rec.D * rec.s);
+        if ((small && next >= rec.from && next <= rec.to) || fabs(step) <= 4e-16 * (fabs(phi) + 1e-3)) {
             found_phi = next;
             found_step = step;
             return rec.D + step * rec.dD > 0;

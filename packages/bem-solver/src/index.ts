@@ -11,6 +11,8 @@ export type { ViternaOptions } from './airfoil/viterna.ts';
 export { annualEnergy, windShareBelow } from './operation/annual-energy.ts';
 export type { PowerPoint, WindDistribution } from './operation/annual-energy.ts';
 export { isaAir } from './operation/atmosphere.ts';
+export { WIND_CLASSES } from './operation/wind-class.ts';
+export type { WindClass } from './operation/wind-class.ts';
 export { operatingSchedule } from './operation/schedule.ts';
 export type { Governor, SchedulePoint, ScheduleResult, ScheduleSpec } from './operation/schedule.ts';
 export { spanLoads } from './loads/span-loads.ts';
@@ -29,6 +31,8 @@ export { DEFAULT_OPTIONS, HIGH_INDUCTION, resolveOptions } from './section/optio
 export type { HighInduction, SolverOptions } from './section/options.ts';
 export { emptyState, solveSection } from './section/solve-section.ts';
 export type { SectionInput, SectionState, SectionStatus } from './section/solve-section.ts';
-export { betzSection, schmitzSection } from './sizing/planform.ts';
+export { betzPlanform, betzSection, schmitzPlanform, schmitzSection } from './sizing/planform.ts';
+export type { OptimumSection, Planform, PlanformInput } from './sizing/planform.ts';
 export { retwist } from './sizing/retwist.ts';
 export { sizeBlade } from './sizing/size-blade.ts';
+export type { SizingInput } from './sizing/size-blade.ts';

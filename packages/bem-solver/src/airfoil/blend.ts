@@ -22,18 +22,22 @@ function sameGrid(a: ArrayLike<number>, b: ArrayLike<number>): boolean {
   return true;
 }
 
-/** Both tables on the union of their angles, mixed linearly: (1 − weightB)·a + weightB·b, weightB in [0, 1]. */
+/**
+ * Both tables on the union of their angles, mixed linearly: (1 − weightB)·a + weightB·b, weightB in [0, 1]. Beyond its own rows a
+ * table keeps its end values. The moment is mixed where both have it, else left out.
+ */
 export function blendPolars(a: PolarTable, b: PolarTable, weightB: number): PolarTable {
   if (!(weightB >= 0 && weightB <= 1)) throw new SolverInputError('weightB', weightB, 'a number from 0 to 1');
-  if (sameGrid(a.alphaDeg, b.alphaDeg)) {
-    const mix = (p: ArrayLike<number>, q: ArrayLike<number>) =>
-      Float64Array.from({ length: p.length }, (_, i) => (p[i] ?? 0) + weightB * ((q[i] ?? 0) - (p[i] ?? 0)));
-    return { alphaDeg: a.alphaDeg, cl: mix(a.cl, b.cl), cd: mix(a.cd, b.cd) };
-  }
-  const grid = Float64Array.from(new Set([...Array.from(a.alphaDeg), ...Array.from(b.alphaDeg)])).sort();
+  const same = sameGrid(a.alphaDeg, b.alphaDeg);
+  const grid = same
+    ? Float64Array.from(a.alphaDeg)
+    : Float64Array.from(new Set([...Array.from(a.alphaDeg), ...Array.from(b.alphaDeg)])).sort();
   const mix = (p: ArrayLike<number>, q: ArrayLike<number>) =>
-    grid.map((at) => (1 - weightB) * valueAt(a.alphaDeg, p, at) + weightB * valueAt(b.alphaDeg, q, at));
-  return { alphaDeg: grid, cl: mix(a.cl, b.cl), cd: mix(a.cd, b.cd) };
+    same
+      ? grid.map((_, i) => (p[i] ?? 0) + weightB * ((q[i] ?? 0) - (p[i] ?? 0)))
+      : grid.map((at) => (1 - weightB) * valueAt(a.alphaDeg, p, at) + weightB * valueAt(b.alphaDeg, q, at));
+  const moment = a.cm !== undefined && b.cm !== undefined ? { cm: mix(a.cm, b.cm) } : {};
+  return { alphaDeg: grid, cl: mix(a.cl, b.cl), cd: mix(a.cd, b.cd), ...moment };
 }
 
 export interface ReynoldsTable {
@@ -53,6 +57,11 @@ export function interpolateReynolds(
   const last = set.at(-1);
   if (first === undefined || last === undefined)
     throw new SolverInputError('set', 'empty', 'at least one polar');
+  set.forEach((entry, i) => {
+    const before = set[i - 1]?.reynolds ?? 0;
+    if (!(entry.reynolds > 0 && entry.reynolds >= before))
+      throw new SolverInputError(`set[${i}].reynolds`, entry.reynolds, `above 0 and at least ${before}`);
+  });
   if (!(reynolds > 0)) throw new SolverInputError('reynolds', reynolds, 'a number above 0');
   if (reynolds <= first.reynolds) return { table: first.table, outside: reynolds < first.reynolds };
   if (reynolds >= last.reynolds) return { table: last.table, outside: reynolds > last.reynolds };

@@ -8,6 +8,8 @@ export interface PolarTable {
   readonly alphaDeg: ArrayLike<number>;
   readonly cl: ArrayLike<number>;
   readonly cd: ArrayLike<number>;
+  /** Pitching moment about the quarter chord; kept through blending, not used by the rotor. */
+  readonly cm?: ArrayLike<number>;
 }
 
 export type PolarInterpolation = 'linear' | 'monotone-cubic';
@@ -39,6 +41,8 @@ function checkTable(table: PolarTable): void {
     throw new SolverInputError('cl', `${table.cl.length} rows`, `${n} rows, as alphaDeg`);
   if (table.cd.length !== n)
     throw new SolverInputError('cd', `${table.cd.length} rows`, `${n} rows, as alphaDeg`);
+  if (table.cm !== undefined && table.cm.length !== n)
+    throw new SolverInputError('cm', `${table.cm.length} rows`, `${n} rows, as alphaDeg`);
   for (let i = 0; i < n; i += 1) {
     const alpha = table.alphaDeg[i] ?? NaN;
     if (!Number.isFinite(alpha) || alpha < -180 || alpha > 180)
@@ -47,6 +51,8 @@ function checkTable(table: PolarTable): void {
       throw new SolverInputError(`alphaDeg[${i}]`, alpha, `above the row before, ${table.alphaDeg[i - 1]}`);
     if (!Number.isFinite(table.cl[i])) throw new SolverInputError(`cl[${i}]`, table.cl[i], 'a finite number');
     if (!Number.isFinite(table.cd[i])) throw new SolverInputError(`cd[${i}]`, table.cd[i], 'a finite number');
+    if (table.cm !== undefined && !Number.isFinite(table.cm[i]))
+      throw new SolverInputError(`cm[${i}]`, table.cm[i], 'a finite number');
   }
 }
 
@@ -91,10 +97,20 @@ export function compilePolar(
     alpha,
     cl,
     cd,
-    clSlope: cubic ? pchipSlopes(alpha, cl) : null,
-    cdSlope: cubic ? pchipSlopes(alpha, cd) : null,
+    clSlope: cubic ? periodicSlopes(alpha, cl, closed === rows) : null,
+    cdSlope: cubic ? periodicSlopes(alpha, cd, closed === rows) : null,
   };
   return { ...columns, bucket, nodes: polarNodes(columns, closed === rows ? 0 : 1) };
+}
+
+/** Slopes of the monotone cubic with the rows of the turns before and after at hand, so that it closes smoothly. */
+function periodicSlopes(alpha: Float64Array, y: Float64Array, closed: boolean): Float64Array {
+  const n = alpha.length;
+  // A closed table's last row is its first; else the rows at both ends are those of the neighbouring turns.
+  const back = closed ? n - 2 : n - 3;
+  const ahead = closed ? 1 : 2;
+  const x = [(alpha[back] ?? 0) - TURN, ...alpha, (alpha[ahead] ?? 0) + TURN];
+  return pchipSlopes(x, [y[back] ?? 0, ...y, y[ahead] ?? 0]).slice(1, n + 1);
 }
 
 /** A look-up: the angle asked for, and what was found. Slopes per rad. */

@@ -8,7 +8,8 @@ export interface RootResult {
   readonly evaluations: number;
 }
 
-const MAX_STEPS = 100;
+/** Far more than a simple root needs; a root of high order takes over a hundred. */
+const MAX_STEPS = 400;
 
 /**
  * Root of `f` in [a, b] with f(a)·f(b) ≤ 0 by Brent's method.

@@ -53,7 +53,8 @@ export interface PointResult {
 const DEG = 180 / Math.PI;
 const solver = newSectionSolver();
 
-const orNull = (value: number) => (Number.isFinite(value) ? value : null);
+/** Null for what is not a finite number; adding 0 turns −0 into 0. */
+const orNull = (value: number) => (Number.isFinite(value) ? value + 0 : null);
 
 function sectionResult(
   rotor: Rotor,

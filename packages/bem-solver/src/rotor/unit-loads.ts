@@ -27,8 +27,8 @@ export function takeElement(
 
 /**
  * Solves the solver's element at the ratio set in its balance and adds the load at `at`; false where it has no solution. The
- * balance stands one last Newton step from the root: the loads are carried there to first order, the rest being of the square
- * of 2e-8.
+ * balance stands one last Newton step from the root: the loads are carried there to first order, the rest being of the order of
+ * 1e-11 of them.
  */
 function addSolved(
   rotor: Rotor,

@@ -3,10 +3,10 @@ import type { Balance } from './balance.ts';
 import type { Branch } from './branch.ts';
 
 /**
- * Newton's last step (rad) that is taken without looking again: the error left is of the order of its square. Only where
- * the curve is smooth, i.e. with Buhl's relation and no row of the polar in between.
+ * Newton's last step is taken without looking again where it changes D and sin φ by less than this share: what is left is of
+ * the order of its square. Only where the curve is smooth, i.e. with Buhl's relation and no row of the polar in between.
  */
-const LAST_STEP = 2e-8;
+const LAST_CHANGE = 3e-6;
 const MAX_STEPS = 120;
 
 /** Start in a cell: φ as a cubic of λr between the nodes where both slopes allow it, else the chord of the balance. */
@@ -40,7 +40,8 @@ function arrived(balance: Balance, step: number): boolean {
 
 /**
  * The root of λr·D − N at the balance's λr in a cell of the branch, by Newton's method kept inside the cell by bisection. Stops
- * when the next step is below 2e-8 rad on a smooth piece (the step is then taken), or below the spacing of numbers.
+ * when the next step changes the balance by less than 3e-6 of itself on a smooth piece (the step is then taken), or is below
+ * the spacing of numbers.
  * @returns whether it converged; the root and the last step are in the balance
  */
 export function rootInCell(balance: Balance, branch: Branch, cell: number): boolean {
@@ -48,7 +49,7 @@ export function rootInCell(balance: Balance, branch: Branch, cell: number): bool
   let low = branch.phi[cell] as number;
   let high = branch.phi[cell + 1] as number;
   const atLow = lambda * (branch.denominator[cell] as number) - (branch.numerator[cell] as number);
-  const lastStep = balance.relation === 'buhl' ? LAST_STEP : 0;
+  const lastChange = balance.relation === 'buhl' ? LAST_CHANGE : 0;
   let phi = startIn(branch, cell, lambda);
   if (!(phi >= low && phi <= high)) phi = 0.5 * (low + high);
   for (let count = 0; count < MAX_STEPS; count += 1) {
@@ -59,7 +60,10 @@ export function rootInCell(balance: Balance, branch: Branch, cell: number): bool
     const next = phi + step;
     const size = Math.abs(step);
     // Convergence comes before the look at the bracket: rounding may put a converged step just outside.
-    if (size <= lastStep && next >= balance.phiFrom && next <= balance.phiTo) return arrived(balance, step);
+    const D = balance.denominator;
+    const change = size * (Math.abs(balance.denominatorSlope * balance.sine) + Math.abs(D));
+    const small = change <= lastChange * Math.abs(D * balance.sine);
+    if (small && next >= balance.phiFrom && next <= balance.phiTo) return arrived(balance, step);
     if (size <= 4e-16 * (Math.abs(phi) + 1e-3)) return arrived(balance, step);
     if (g * atLow > 0) low = phi;
     else high = phi;

@@ -1,3 +1,5 @@
+import { requireNumber } from '../input-error.ts';
+
 /** Local planform of an optimum rotor: inflow angle (rad) and chord (m) at a radius. */
 export interface OptimumSection {
   readonly phi: number;
@@ -29,4 +31,40 @@ export function schmitzSection(
   const local = (tipSpeedRatio * radiusM) / tipRadiusM;
   const phi = (2 / 3) * Math.atan(1 / local);
   return { phi, chordM: (8 * Math.PI * radiusM * (1 - Math.cos(phi))) / (bladeCount * lift) };
+}
+
+export interface Planform {
+  readonly radiusM: Float64Array;
+  readonly chordM: Float64Array;
+  /** Inflow angle φ; twist follows by taking off the angle of attack. */
+  readonly inflowRad: Float64Array;
+}
+
+function planform(
+  section: (input: PlanformInput, radiusM: number) => OptimumSection,
+  input: PlanformInput,
+  radii: ArrayLike<number>,
+): Planform {
+  requireNumber('bladeCount', input.bladeCount, 1, 100);
+  requireNumber('tipRadiusM', input.tipRadiusM, 0, Infinity, true);
+  requireNumber('tipSpeedRatio', input.tipSpeedRatio, 0, 100, true);
+  requireNumber('lift', input.lift, 0, 10, true);
+  const radiusM = Float64Array.from(radii);
+  radiusM.forEach((r, i) => requireNumber(`radii[${i}]`, r, 0, input.tipRadiusM, true));
+  const sections = Array.from(radiusM, (r) => section(input, r));
+  return {
+    radiusM,
+    chordM: Float64Array.from(sections, (s) => s.chordM),
+    inflowRad: Float64Array.from(sections, (s) => s.phi),
+  };
+}
+
+/** Betz's planform at radii (m) above 0 up to the tip radius. */
+export function betzPlanform(input: PlanformInput, radii: ArrayLike<number>): Planform {
+  return planform(betzSection, input, radii);
+}
+
+/** Schmitz's planform at radii (m) above 0 up to the tip radius. */
+export function schmitzPlanform(input: PlanformInput, radii: ArrayLike<number>): Planform {
+  return planform(schmitzSection, input, radii);
 }

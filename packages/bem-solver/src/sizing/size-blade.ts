@@ -6,7 +6,8 @@ export interface SizingInput {
   readonly hubRadiusM: number;
   readonly tipRadiusM: number;
   readonly tipSpeedRatio: number;
-  readonly designLift: number;
+  /** Lift coefficient to design for: one for the whole span, or by r/R. */
+  readonly designLift: number | ((share: number) => number);
   /** Angle of attack of the design lift (°). */
   readonly designAlphaDeg: number;
   readonly maxChordM?: number;
@@ -54,19 +55,21 @@ export function sizeBlade(input: SizingInput): {
   requireNumber('hubRadiusM', hubRadiusM, 0, tipRadiusM, true);
   requireNumber('bladeCount', input.bladeCount, 1, 100);
   requireNumber('tipSpeedRatio', input.tipSpeedRatio, 0.5, 30);
-  requireNumber('designLift', input.designLift, 0, 3, true);
   requireNumber('designAlphaDeg', input.designAlphaDeg, -20, 30);
   requireNumber('stationCount', stationCount, 3, 1000);
   if (input.maxChordM !== undefined) requireNumber('maxChordM', input.maxChordM, 0, Infinity, true);
-  const planform = {
-    bladeCount: input.bladeCount,
-    tipRadiusM,
-    tipSpeedRatio: input.tipSpeedRatio,
-    lift: input.designLift,
-  };
+  const liftAt = (share: number) =>
+    requireNumber(
+      'designLift',
+      typeof input.designLift === 'number' ? input.designLift : input.designLift(share),
+      0,
+      3,
+      true,
+    );
   const stations = stationRadii(hubRadiusM, tipRadiusM, stationCount).map((radiusM) => {
     const share = radiusM / tipRadiusM;
-    const best = schmitzSection(planform, radiusM);
+    const { bladeCount, tipSpeedRatio } = input;
+    const best = schmitzSection({ bladeCount, tipRadiusM, tipSpeedRatio, lift: liftAt(share) }, radiusM);
     const capped =
       input.maxChordM === undefined
         ? best.chordM
