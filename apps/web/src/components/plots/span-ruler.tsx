@@ -47,7 +47,7 @@ export function SpanRuler({ cursorRadiusM }: { cursorRadiusM: number | null }) {
         </text>
         {cursorRadiusM !== null && <path d={`M${axis.scale(cursorRadiusM)} 0l4 6h-8z`} fill="var(--ink)" />}
       </svg>
-      <p className="h-5 pl-[52px] font-mono text-xs tabular-nums" data-testid="span-readout">
+      <p className="m-0 min-h-5 pl-[52px] font-mono text-xs tabular-nums" data-testid="span-readout">
         {share === null
           ? 'Span cursor: point at a plot, or use the arrow keys on one'
           : `r ${formatQuantity('radiusM', cursorRadiusM)} m   r/R ${share.toFixed(3)}`}

@@ -3,7 +3,6 @@ import type { SolverCall, SolverCalls, SolverContext, SolverReply, SolverRequest
 
 /** Marks an evaluation of a draft: it was never saved, so it has no hash to be found by. */
 const UNSAVED = 'unsaved';
-const WARM_UP_SOLVES = 6;
 
 type Handlers = {
   [C in SolverCall]: (input: SolverCalls[C]['input']) => SolverCalls[C]['output'];
@@ -23,8 +22,7 @@ function handlersFor(contexts: Map<string, SolverContext>): Handlers {
     warmUp: ({ key, content }) => {
       const { specification, airfoils } = contextOf(key);
       const start = performance.now();
-      for (let i = 0; i < WARM_UP_SOLVES; i += 1)
-        solveLive({ content, specification, airfoils, tipSpeedRatio: null });
+      solveLive({ content, specification, airfoils, tipSpeedRatio: null });
       return performance.now() - start;
     },
     solveLive: ({ key, content, tipSpeedRatio }) => {

@@ -12,7 +12,7 @@ export interface SolverContext {
 /** Every call the worker answers: what goes in and what comes out. `key` names the context it is held against. */
 export interface SolverCalls {
   setContext: { input: { key: string; context: SolverContext }; output: null };
-  /** Solves a few times and throws the results away, so that the first edit meets compiled code. Milliseconds taken. */
+  /** Solves once and throws the result away, so that the next edit meets compiled code. Milliseconds taken. */
   warmUp: { input: { key: string; content: DesignContent }; output: number };
   solveLive: {
     input: { key: string; content: DesignContent; tipSpeedRatio: number | null };

@@ -16,14 +16,14 @@ export function Pending({
   children,
 }: {
   current: boolean;
-  /** 'solving …', or why the draft cannot be solved. */
-  reason: string;
+  /** 'solving …', or why the draft cannot be solved; null where it is said nearby. */
+  reason: string | null;
   children: ReactNode;
 }) {
   return (
     <div data-current={current} className={classNames('relative', !current && SET_BACK_INSIDE)}>
       {children}
-      {!current && (
+      {!current && reason !== null && (
         <span className="pointer-events-none absolute top-7 right-16 z-10 animate-appear border border-rule bg-paper px-1.5 text-xs text-ink-soft">
           {reason}
         </span>

@@ -131,13 +131,14 @@ export function RotorColumn(props: RotorColumnProps) {
       <HeadlineTable numbers={numbers} referenceLabel={reference?.label ?? null} unlike={unlike} />
       <div className="min-h-32 flex-1 overflow-auto">
         <VerdictTable evaluation={evaluation} pendingReason={pendingReason} cursors={cursors} />
-        <WarningList
-          warnings={warnings}
-          current={live.current}
-          pendingReason={pendingReason}
-          stationRadiiM={props.stationRadiiM}
-          cursors={cursors}
-        />
+        {live.output !== null && (
+          <WarningList
+            warnings={warnings}
+            current={live.current}
+            stationRadiiM={props.stationRadiiM}
+            cursors={cursors}
+          />
+        )}
       </div>
     </section>
   );

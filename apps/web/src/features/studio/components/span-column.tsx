@@ -1,6 +1,6 @@
 import type { DesignContent, Specification } from '@tipward/contract';
 import type { AirfoilData, BladeSurface, LiveResult } from '@tipward/design-model';
-import { useMemo, useState } from 'react';
+import { memo, useDeferredValue, useMemo, useState } from 'react';
 import type { ReactNode } from 'react';
 import type { PlotLimit } from '../../../components/plots/plot-series.ts';
 import { SpanAxis } from '../../../components/plots/span-axis.tsx';
@@ -32,6 +32,9 @@ export interface SpanColumnProps {
 }
 
 const NO_LIMITS: readonly PlotLimit[] = [];
+/** Beyond so many stations their dots and rings run into one another. */
+const DOTS_SHOWN = 60;
+const NO_RADII: readonly number[] = [];
 
 function Plot({
   quantity,
@@ -50,7 +53,10 @@ function Plot({
 }) {
   const { live, reference, cursors } = props;
   const cursorRadiusM = useCursor(cursors, (held) => held.radiusM);
-  const series = useMemo(() => spanSeries(quantity, live, reference), [quantity, live, reference]);
+  const series = useMemo(
+    () => spanSeries(quantity, live, reference, stations),
+    [quantity, live, reference, stations],
+  );
   const yDomain = useMemo(
     () => (quantity.id === 'alpha' ? alphaDomain(live, reference) : undefined),
     [quantity, live, reference],
@@ -68,7 +74,7 @@ function Plot({
       limits={limits}
       heading={choice}
       {...(yDomain === undefined ? {} : { yDomain })}
-      {...(stations === undefined ? {} : { stations })}
+      {...(stations === undefined || stations.length > DOTS_SHOWN ? {} : { stations })}
       {...(reference === null ? {} : { differenceBaseId: 'reference' })}
     />
   );
@@ -105,7 +111,7 @@ function Ruler({ cursors }: { cursors: CursorStore }) {
   return <SpanRuler cursorRadiusM={useCursor(cursors, (held) => held.radiusM)} />;
 }
 
-function Preview({
+const Preview = memo(function Preview({
   content,
   surface,
   reference,
@@ -117,7 +123,10 @@ function Preview({
   cursors: CursorStore;
 }) {
   const cursorRadiusM = useCursor(cursors, (held) => held.radiusM);
-  const radii = useMemo(() => content.stations.map((station) => station.radiusM), [content]);
+  const radii = useMemo(
+    () => (content.stations.length > DOTS_SHOWN ? NO_RADII : content.stations.map((s) => s.radiusM)),
+    [content],
+  );
   return (
     <BladePreview
       surface={surface}
@@ -128,7 +137,7 @@ function Preview({
       height={124}
     />
   );
-}
+});
 
 /** Everything spanwise on one pixel axis: the blade, chord, twist and two plots of choice. */
 export function SpanColumn(props: SpanColumnProps) {
@@ -145,7 +154,9 @@ export function SpanColumn(props: SpanColumnProps) {
     pendingReason,
   } = props;
   const [choice, setChoice] = useState(readPlotChoice);
-  const surface = useMemo(() => surfaceOf(content, airfoils), [content, airfoils]);
+  // The blade may come a moment after the curves: it is drawn in what time they leave.
+  const lofted = useDeferredValue(content);
+  const surface = useMemo(() => surfaceOf(lofted, airfoils), [lofted, airfoils]);
   const chordDots = useMemo(() => content?.stations.map((s) => [s.radiusM, s.chordM] as const), [content]);
   const twistDots = useMemo(() => content?.stations.map((s) => [s.radiusM, s.twistDeg] as const), [content]);
   const choose = (slot: number, id: string) => {
@@ -155,10 +166,10 @@ export function SpanColumn(props: SpanColumnProps) {
   };
   const shared = { reference, cursors };
   return (
-    <section aria-label="Along the span" className="min-w-0">
+    <section aria-label="Along the span" className="min-h-0 min-w-0 xl:overflow-x-hidden xl:overflow-y-auto">
       <SpanAxis hubRadiusM={specification.hubRadiusM} tipRadiusM={specification.tipRadiusM}>
-        {surface !== null && content !== null && (
-          <Preview content={content} surface={surface} reference={referenceSurface} cursors={cursors} />
+        {surface !== null && lofted !== null && (
+          <Preview content={lofted} surface={surface} reference={referenceSurface} cursors={cursors} />
         )}
         {live !== null && (
           <Pending current={current} reason={pendingReason}>
@@ -185,6 +196,11 @@ export function SpanColumn(props: SpanColumnProps) {
               );
             })}
           </Pending>
+        )}
+        {live === null && (
+          <p role="status" className="m-0 animate-appear py-4 pl-[52px] text-[13px] text-ink-soft">
+            {pendingReason}
+          </p>
         )}
         <Ruler cursors={cursors} />
       </SpanAxis>

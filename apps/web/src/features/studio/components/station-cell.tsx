@@ -97,7 +97,7 @@ export function StationCell({
       data-column={columnIndex}
       title={fault}
       className={classNames(
-        'relative h-7 scroll-mt-8 border-r border-b border-rule px-1.5 whitespace-nowrap',
+        'relative h-7 border-r border-b border-rule px-1.5 whitespace-nowrap',
         first && 'sticky left-0 z-[5] font-medium',
         column.field === 'airfoil' ? 'max-w-24 truncate text-[13px]' : 'figures text-right text-[13px]',
         selected ? 'bg-accent-wash' : first ? 'bg-panel' : 'bg-sheet',

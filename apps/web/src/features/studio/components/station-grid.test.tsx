@@ -10,8 +10,6 @@ import { StationGrid } from './station-grid.tsx';
 
 afterEach(cleanup);
 
-Element.prototype.scrollIntoView = vi.fn();
-
 function Bench({ count }: { count: number }) {
   const [state, dispatch] = useReducer(studioReducer, sampleDraft(count), startState);
   return (

@@ -4,6 +4,7 @@ import type { Dispatch, PointerEvent } from 'react';
 import { Button } from '../../../components/ui/button.tsx';
 import { boundsOf } from '../lib/grid-range.ts';
 import type { RowNotes } from '../lib/row-notes.ts';
+import { revealCell } from '../lib/reveal-cell.ts';
 import { notesText } from '../lib/row-notes.ts';
 import { STATION_COLUMNS } from '../lib/station-columns.ts';
 import type { StudioAction } from '../lib/studio-reducer.ts';
@@ -33,7 +34,8 @@ function placeOf(event: PointerEvent<HTMLElement>) {
 export function StationGrid({ content, dispatch, notes, reference, cursorRow, onRow }: StationGridProps) {
   const id = useId();
   const table = useRef<HTMLTableElement>(null);
-  const grid = useStationGrid(content, dispatch, () => table.current?.focus());
+  const frame = useRef<HTMLDivElement>(null);
+  const grid = useStationGrid(content, dispatch, () => table.current?.focus({ preventScroll: true }));
   const { range, edit } = grid;
   const bounds = boundsOf(range);
   const activeId =
@@ -45,7 +47,8 @@ export function StationGrid({ content, dispatch, notes, reference, cursorRow, on
   }, [onRow]);
   useEffect(() => {
     if (activeId === undefined || !table.current?.contains(document.activeElement)) return;
-    document.getElementById(activeId)?.scrollIntoView({ block: 'nearest', inline: 'nearest' });
+    const cell = document.getElementById(activeId);
+    if (cell !== null && frame.current !== null) revealCell(frame.current, cell);
     follow.current(range.focus.row);
   }, [activeId, range.focus.row]);
 
@@ -57,10 +60,11 @@ export function StationGrid({ content, dispatch, notes, reference, cursorRow, on
       : { edit, airfoilNames, onChange: changeEdit, onKeyDown: onEditKeyDown, onEnd: endEdit };
 
   const activeNotes = notesText(notes.get(range.focus.row));
+  const failing = Object.keys(notes.get(range.focus.row)?.faults ?? {}).length > 0;
   return (
     <section aria-label="Stations" className="flex min-h-0 flex-col">
       <StationTools count={content.stations.length} grid={grid} />
-      <div className="min-h-0 flex-1 overflow-auto border border-rule">
+      <div ref={frame} className="min-h-0 flex-1 overflow-auto border border-rule">
         <table
           ref={table}
           role="grid"
@@ -126,7 +130,9 @@ export function StationGrid({ content, dispatch, notes, reference, cursorRow, on
           Station {content.stations.length === 0 ? 0 : range.focus.row + 1} of {content.stations.length}
           {grid.notice === '' ? '' : ` · ${grid.notice}`}
         </span>
-        {activeNotes !== '' && <span className="block text-look">{activeNotes}</span>}
+        {activeNotes !== '' && (
+          <span className={failing ? 'block text-fails' : 'block text-look'}>{activeNotes}</span>
+        )}
       </p>
     </section>
   );

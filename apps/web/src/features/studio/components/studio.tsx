@@ -114,7 +114,11 @@ function Results({ model, issue }: { model: Model; issue: SpecificationIssue }) 
   const limits = useMemo(() => ({ chord: chordLimits(issue) }), [issue]);
   const stations = checked.lastValid?.stations;
   const pendingReason =
-    checked.faults.length > 0 ? 'earlier result: the draft has faults' : (solver.live.error ?? 'solving …');
+    checked.faults.length > 0
+      ? solver.live.output === null
+        ? 'not solved: the draft has faults'
+        : 'earlier result: the draft has faults'
+      : (solver.live.error ?? 'solving …');
   const radii = useMemo(() => (stations ?? []).map((station) => station.radiusM), [stations]);
   return (
     <>

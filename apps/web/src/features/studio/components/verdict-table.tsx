@@ -73,10 +73,13 @@ export function VerdictTable({
         <span className="text-xs font-normal">
           {output !== null && <VerdictCounts verdicts={output.verdicts} />}
         </span>
+        {!current && error === null && (
+          <span className="animate-appear text-xs font-normal text-ink-soft">{pendingReason}</span>
+        )}
       </h2>
       {error !== null && <p className="m-0 text-xs text-fails">Not evaluated: {error}</p>}
       {rows.length > 0 && (
-        <Pending current={current} reason={pendingReason}>
+        <Pending current={current} reason={null}>
           <table className="w-full border-collapse [&_td]:pl-2">
             <thead className="text-xs text-ink-soft">
               <tr>

@@ -6,13 +6,11 @@ import { Pending } from './pending.tsx';
 export function WarningList({
   warnings,
   current,
-  pendingReason,
   stationRadiiM,
   cursors,
 }: {
   warnings: readonly Warning[];
   current: boolean;
-  pendingReason: string;
   stationRadiiM: readonly number[];
   cursors: CursorStore;
 }) {
@@ -21,7 +19,7 @@ export function WarningList({
       <h2 className="m-0 text-sm font-medium">
         Warnings <span className="figures text-xs font-normal text-ink-soft">{warnings.length}</span>
       </h2>
-      <Pending current={current} reason={pendingReason}>
+      <Pending current={current} reason={null}>
         {warnings.length === 0 ? (
           <p className="m-0 text-xs text-ink-soft">None.</p>
         ) : (

@@ -16,18 +16,25 @@ interface LiveRequest extends Solvable {
   readonly tipSpeedRatio: number | null;
 }
 
+/** After so many solves the worker's code is compiled. */
+const WARM_AFTER = 8;
 const EVALUATION_QUIET_MS = 150;
 
 function liveChannel(link: SolverLink, key: string) {
-  let warm = false;
-  return new LatestOnly<LiveRequest, LiveResult>(({ content, context, tipSpeedRatio }) => {
-    link.setContext(key, context);
-    const answer = link.call('solveLive', { key, content, tipSpeedRatio });
-    if (!warm) {
-      warm = true;
-      // Behind the first answer, before the first edit. Its failure is the first answer's failure, which is shown.
-      link.call('warmUp', { key, content }).catch(() => undefined);
+  let solves = 0;
+  const warmUp = async (content: DesignContent) => {
+    // One solve at a time and only while nothing was asked: an edit waits for one of them at most.
+    for (let expected = solves; solves === expected && solves < WARM_AFTER; expected += 1) {
+      solves += 1;
+      await link.call('warmUp', { key, content });
     }
+  };
+  return new LatestOnly<LiveRequest, LiveResult>(async ({ content, context, tipSpeedRatio }) => {
+    link.setContext(key, context);
+    solves += 1;
+    const answer = await link.call('solveLive', { key, content, tipSpeedRatio });
+    // A failure of the same solve is the answer's own failure, which is shown.
+    warmUp(content).catch(() => undefined);
     return answer;
   });
 }

@@ -26,11 +26,23 @@ const stallAngle = (point: SpanPoint): number | null =>
 /** Root sections are round: their 'stall' lies far above the plot and says nothing. */
 const STALL_SHOWN_PCT = 45;
 
+/** Elements stop short of root and tip; geometry is known there, from the first and the last station. */
+function toTheEnds(points: Points, stations: Points | undefined): Points {
+  const [first, last] = [stations?.[0], stations?.at(-1)];
+  const [from, to] = [points[0], points.at(-1)];
+  return [
+    ...(first !== undefined && from !== undefined && first[0] < from[0] ? [first] : []),
+    ...points,
+    ...(last !== undefined && to !== undefined && last[0] > to[0] ? [last] : []),
+  ];
+}
+
 /** Lines of a spanwise quantity: the draft's, the reference's, and for α the angle of stall. */
 export function spanSeries(
   quantity: SpanQuantity,
   draft: LiveResult,
   reference: DrawnReference | null,
+  stations?: Points,
 ): PlotSeries[] {
   const lines: PlotSeries[] = [];
   if (reference !== null)
@@ -46,7 +58,7 @@ export function spanSeries(
         point.thicknessPct > STALL_SHOWN_PCT ? null : stallAngle(point),
       ),
     });
-  lines.push({ ...DRAFT, points: along(draft.span.points, quantity.pick) });
+  lines.push({ ...DRAFT, points: toTheEnds(along(draft.span.points, quantity.pick), stations) });
   return lines;
 }
 
