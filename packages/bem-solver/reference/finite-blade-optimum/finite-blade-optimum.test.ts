@@ -1,5 +1,6 @@
 import { describe, it } from 'vitest';
 import { solvePoint } from '../../src/index.ts';
+import { finiteBladeOptimum } from './finite-blade-rotor.ts';
 import { LOSSLESS, optimumRotor } from '../lossless-rotor.ts';
 import { holds } from '../print-error.ts';
 
@@ -16,6 +17,20 @@ const WITH_TIP_LOSS: readonly (readonly [number, number])[] = [
   [7, 0.53221],
   [8, 0.54016],
   [10, 0.55125],
+];
+
+/** B, cl/cd, λ, CP: optimum with Prandtl's factor and drag, by integration (see SOURCE.md). */
+const OPTIMUM: readonly (readonly [number, number, number, number])[] = [
+  [3, 25, 4, 0.40708],
+  [3, 50, 6, 0.45926],
+  [3, 50, 7, 0.45846],
+  [3, 50, 10, 0.44354],
+  [3, 100, 7, 0.49501],
+  [3, 100, 15, 0.48247],
+  [3, Infinity, 7, 0.53221],
+  [2, 100, 8, 0.47978],
+  [1, 100, 10, 0.44437],
+  [1, Infinity, 6, 0.4383],
 ];
 
 describe('optimum rotor with drag and finite blades', () => {
@@ -39,4 +54,12 @@ describe('optimum rotor with drag and finite blades', () => {
     const point = solvePoint(rotor, { windSpeedMS: 10, rotorSpeedRadS: 2 * lambda, pitchDeg: 0 });
     holds(`CP at λ ${lambda}`, Math.abs((point.cp ?? NaN) / cp - 1), 0.005);
   });
+  it.each(OPTIMUM)(
+    '%d blades, cl/cd %d, λ %d: optimum with tip loss and drag',
+    (blades, glide, lambda, cp) => {
+      const rotor = finiteBladeOptimum(blades, glide, lambda);
+      const point = solvePoint(rotor, { windSpeedMS: 10, rotorSpeedRadS: 10 * lambda, pitchDeg: 0 });
+      holds(`CP, B ${blades}, cl/cd ${glide}, λ ${lambda}`, Math.abs((point.cp ?? NaN) / cp - 1), 5e-4);
+    },
+  );
 });

@@ -34,11 +34,9 @@ export function inverseOneMinusA(relation: HighInduction, kappa: number, F: numb
   if (relation === 'buhl') return 5 / 3 - F + Math.sqrt(Math.max(0, 2 * F * kappa - F * (4 / 3 - F)));
   if (relation === 'straight-tangent') {
     const m = 1 - 2 * TANGENT_INDUCTION;
-    const half = kappa + m / 2;
-    // κ(1 − a)² = a_c² + m·a, smaller root, with the quotient turned to avoid cancellation.
-    const a =
-      (kappa - TANGENT_INDUCTION ** 2) /
-      (half + Math.sqrt(half * half - kappa * (kappa - TANGENT_INDUCTION ** 2)));
+    const square = TANGENT_INDUCTION ** 2;
+    // κ(1 − a)² = a_c² + m·a, smaller root, with the quotient turned and the discriminant multiplied out to keep their digits.
+    const a = (kappa - square) / (kappa + m / 2 + Math.sqrt(kappa * (m + square) + (m * m) / 4));
     return 1 / (1 - a);
   }
   return 1 / (1 - glauertInduction(kappa, F));
@@ -52,10 +50,14 @@ function glauertInduction(kappa: number, F: number): number {
   const k = 4 * F * kappa;
   if (k * (1 - SWITCH_INDUCTION) ** 2 <= highInductionThrust('glauert', SWITCH_INDUCTION, F))
     return SWITCH_INDUCTION;
-  const A = k - (F * F) / 0.6427;
-  const B = -2 * k + (2 * 0.143 * F) / 0.6427;
-  const C = k - 0.889 + (0.0203 - 0.143 ** 2) / 0.6427;
-  const q = -0.5 * (B - Math.sqrt(Math.max(0, B * B - 4 * A * C)));
+  const p = (F * F) / 0.6427;
+  const linear = (2 * 0.143 * F) / 0.6427;
+  const constant = 0.889 - (0.0203 - 0.143 ** 2) / 0.6427;
+  // A = k − p, B = −2k + linear, C = k − constant; B² − 4AC multiplied out, for its terms in k² cancel.
+  const discriminant = 4 * k * (constant + p - linear) + linear * linear - 4 * p * constant;
+  const A = k - p;
+  const q = k - 0.5 * linear + 0.5 * Math.sqrt(Math.max(0, discriminant));
+  const C = k - constant;
   const small = C / q;
   return small >= SWITCH_INDUCTION - 1e-9 && small <= 1 ? small : q / A;
 }
