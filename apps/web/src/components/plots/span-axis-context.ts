@@ -14,7 +14,7 @@ export interface SpanAxisValue {
   readonly scale: ScaleLinear<number, number>;
 }
 
-export const SPAN_MARGIN = { left: 52, right: 60 } as const;
+const SPAN_MARGIN = { left: 52, right: 60 } as const;
 
 export function spanAxis(hubRadiusM: number, tipRadiusM: number, width: number): SpanAxisValue {
   const left = SPAN_MARGIN.left;
