@@ -69,6 +69,7 @@ function writeState(secretFile, state) {
 async function launch(cluster) {
   const { state, secretFile, user } = cluster;
   if (state.port === 0 || !(await isFree(state.port))) state.port = await freePort();
+  removeSockets(state);
   state.sockets = mkdtempSync(join(TEMPORARY, 'tipward-'));
   user.giveToServer(state.sockets);
   writeState(secretFile, state);
@@ -105,6 +106,9 @@ async function halt({ bin, dataDir, user, state }) {
       lasting: true,
       cwd: '/',
     });
-  if (state.sockets !== null && state.sockets !== undefined)
-    rmSync(state.sockets, { recursive: true, force: true });
+  removeSockets(state);
+}
+
+function removeSockets({ sockets }) {
+  if (typeof sockets === 'string') rmSync(sockets, { recursive: true, force: true });
 }

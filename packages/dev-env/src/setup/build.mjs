@@ -5,7 +5,8 @@ import { mustRun } from '../processes/run.mjs';
 import { PNPM } from './install.mjs';
 import { LOCAL, ROOT } from './paths.mjs';
 
-const SKIPPED = new Set(['node_modules', 'dist', '.local', '.git', 'test-results', 'playwright-report']);
+/** What no build reads. */
+const SKIPPED = new Set(['node_modules', 'dist', 'dev-env', 'e2e']);
 const SOURCES = ['packages', 'apps', 'seeds', 'pnpm-lock.yaml', 'tsconfig.base.json'];
 const RESULTS = ['apps/web/dist/index.html', 'apps/api/dist/server.js', 'seeds/dist/seed-demo.js'];
 

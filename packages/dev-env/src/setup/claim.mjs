@@ -1,5 +1,6 @@
 import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
+import { setTimeout as sleep } from 'node:timers/promises';
 import { onShutdown } from '../processes/shutdown.mjs';
 import { SetupError } from './fail.mjs';
 import { LOCAL } from './paths.mjs';
@@ -10,6 +11,15 @@ const FILE = join(LOCAL, 'running.json');
 function runs(pid, part) {
   try {
     return readFileSync(`/proc/${pid}/cmdline`, 'utf8').includes(part);
+  } catch {
+    return false;
+  }
+}
+
+/** Until a killed process is gone, or waits to be collected, its ports are taken. */
+function holdsResources(pid) {
+  try {
+    return !/^State:\s+[ZX]/mu.test(readFileSync(`/proc/${pid}/status`, 'utf8'));
   } catch {
     return false;
   }
@@ -46,6 +56,6 @@ async function stopLeftOvers({ services = [] }) {
   for (const pid of services) {
     if (!runs(pid, 'apps/')) continue;
     process.kill(-pid, 'SIGKILL');
-    while (runs(pid, 'apps/')) await new Promise((resolve) => setTimeout(resolve, 20));
+    while (holdsResources(pid)) await sleep(20);
   }
 }
