@@ -62,15 +62,19 @@ export function maximumCp(
       ((unitLoads(rotor, lambda, pitchDeg, solver)[TORQUE] as number) * lambda) / (area * rotor.tipRadiusM);
     return Number.isFinite(cp) ? cp : -Infinity;
   };
+  // The march shares the tabulated balances of one curve; only the search around its best solves point by point.
+  const march = solveCurve(rotor, {
+    pitchDeg,
+    tipSpeedRatios: Array.from({ length: COARSE + 1 }, (_, i) => at(i)),
+  });
   let best = 0;
   let bestCp = -Infinity;
-  for (let i = 0; i <= COARSE; i += 1) {
-    const cp = cpAt(at(i));
+  march.cp.forEach((cp, i) => {
     if (cp > bestCp) {
       best = i;
       bestCp = cp;
     }
-  }
+  });
   if (bestCp === -Infinity) return null;
   const top = brentMaximum(cpAt, at(Math.max(0, best - 1)), at(Math.min(COARSE, best + 1)), 1e-7);
   return {
