@@ -37,9 +37,7 @@ export interface BenchStation {
   readonly polar: number;
 }
 
-export const tables: readonly PolarTable[] = Array.from({ length: POLARS }, (_, i) =>
-  section(0.4 - 0.055 * i),
-);
+const tables: readonly PolarTable[] = Array.from({ length: POLARS }, (_, i) => section(0.4 - 0.055 * i));
 
 export const stations: readonly BenchStation[] = Array.from({ length: STATIONS }, (_, i) => {
   const share = (i + 0.5) / STATIONS;
