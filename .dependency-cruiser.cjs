@@ -25,6 +25,12 @@ module.exports = {
       'design-model imports contract and solver only.',
     ),
     rule(
+      'scripts-bring-nothing',
+      { path: '^packages/dev-env/src', pathNot: '\\.test\\.mjs$' },
+      { dependencyTypesNot: ['core', 'local'] },
+      'The commands run before anything is installed.',
+    ),
+    rule(
       'package-never-app',
       { path: '^packages/' },
       { path: '^(apps|seeds)/' },
@@ -47,6 +53,12 @@ module.exports = {
       { path: '^apps/e2e/' },
       outside('^apps/e2e/', ['^packages/']),
       'An app never imports an app.',
+    ),
+    rule(
+      'seeds-by-one-door',
+      { path: '^seeds/' },
+      { path: '^apps/', pathNot: '^apps/api/src/seeding\\.ts$' },
+      'The demo is made through what the API opens for seeding.',
     ),
     rule(
       'routes-not-models',
@@ -77,6 +89,12 @@ module.exports = {
       { path: '^apps/api/src/models/', pathNot: [TEST, 'init-models'] },
       { path: '^apps/api/src/models/' },
       'Models import no model.',
+    ),
+    rule(
+      'models-know-nothing-above',
+      { path: '^apps/api/src/models/', pathNot: TEST },
+      { path: '^apps/api/src/(routes|services|policies|presenters|http|jobs)/' },
+      'Models know nothing above them.',
     ),
     rule(
       'feature-never-feature',

@@ -13,7 +13,7 @@ const NAME = 'tipward';
 const UNFINISHED = join(LOCAL, 'demo-unfinished');
 
 /** PostgreSQL of this checkout and its secrets; made where they are missing. */
-export async function openLocalCluster({ leaveRunning = false } = {}) {
+async function openLocalCluster({ leaveRunning = false } = {}) {
   mkdirSync(LOCAL, { recursive: true });
   const newest = await ensureBinaries();
   const dataDir = dataPlace(join(LOCAL, 'postgres'), OUTSIDE);
