@@ -3,7 +3,7 @@
  * Source of the form: I. H. Abbott and A. E. von Doenhoff, Theory of Wing Sections, Dover 1959, sections 6.4–6.6
  * (coefficients from memory); trailing edge closed by the last coefficient.
  */
-export function halfThickness(x: number, thickness: number): number {
+function halfThickness(x: number, thickness: number): number {
   return (
     5 * thickness * (0.2969 * Math.sqrt(x) - 0.126 * x - 0.3516 * x ** 2 + 0.2843 * x ** 3 - 0.1036 * x ** 4)
   );

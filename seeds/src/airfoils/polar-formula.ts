@@ -2,7 +2,7 @@ import { extendViterna } from '@tipward/bem-solver';
 import type { PolarData } from '@tipward/contract';
 
 const RAD = Math.PI / 180;
-export const INVENTED =
+const INVENTED =
   'invented for the demo: smooth formulas, no measurement (seeds/src/airfoils/polar-formula.ts)';
 
 interface Shape {

@@ -27,7 +27,7 @@ export interface EvaluationInput {
 const WIND_STEP_MS = 0.5;
 
 /** Wind speeds of the schedule: cut-in to cut-out in steps of 0.5 m/s, cut-out included. */
-export function scheduleSpeeds(spec: Specification): number[] {
+function scheduleSpeeds(spec: Specification): number[] {
   const count = Math.floor((spec.cutOutMS - spec.cutInMS) / WIND_STEP_MS + 1e-9);
   const speeds = Array.from({ length: count + 1 }, (_, i) =>
     Number((spec.cutInMS + i * WIND_STEP_MS).toFixed(6)),

@@ -39,7 +39,7 @@ interface StationPolar {
 }
 
 /** The fastest the rotor may turn: the lower of the speed and the tip-speed limit (rad/s). */
-export function ratedRotorSpeed(spec: Specification): number {
+function ratedRotorSpeed(spec: Specification): number {
   return Math.min((spec.maxRotorSpeedRpm * Math.PI) / 30, spec.maxTipSpeedMS / spec.tipRadiusM);
 }
 

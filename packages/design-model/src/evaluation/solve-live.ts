@@ -17,7 +17,7 @@ export interface LiveInput {
 const LAMBDA_STEP = 0.2;
 
 /** Tip-speed ratios of the curve: from 1 to well past the design's, evenly spaced. */
-export function curveRatios(designRatio: number): number[] {
+function curveRatios(designRatio: number): number[] {
   const top = Math.max(12, Math.ceil(designRatio * 1.6));
   return Array.from({ length: Math.round((top - 1) / LAMBDA_STEP) + 1 }, (_, i) =>
     Number((1 + i * LAMBDA_STEP).toFixed(6)),
@@ -25,7 +25,7 @@ export function curveRatios(designRatio: number): number[] {
 }
 
 /** The state along the span at one tip-speed ratio and the content's pitch, at rated rotor speed. */
-export function solveSpan(
+function solveSpan(
   prepared: PreparedRotor,
   spec: Specification,
   pitchDeg: number,

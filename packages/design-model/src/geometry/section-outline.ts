@@ -15,7 +15,7 @@ function heightAt(side: readonly Point[], x: number): number {
 }
 
 /** The outline with `count` points on cosine-spaced x: trailing edge, upper side, leading edge, lower side, trailing edge. */
-export function resampleOutline(outline: readonly Point[], count: number): Float64Array {
+function resampleOutline(outline: readonly Point[], count: number): Float64Array {
   const nose = outline.reduce(
     (best, point, i) => (point[0] < (outline[best]?.[0] ?? Infinity) ? i : best),
     0,

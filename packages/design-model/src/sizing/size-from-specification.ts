@@ -14,7 +14,7 @@ export interface SizingInput {
 }
 
 /** Relative thickness along the span: round at the root, the thinnest airfoil outboard. Common practice; a start to edit. */
-export function startThickness(share: number, thinnest: number, thickest: number): number {
+function startThickness(share: number, thinnest: number, thickest: number): number {
   const knots: readonly (readonly [number, number])[] = [
     [0.06, thickest],
     [0.2, Math.min(thickest, Math.max(thinnest, 40))],

@@ -3,7 +3,7 @@ import type { DesignContent, Evaluation } from '@tipward/contract';
 import { canonicalJson, evaluateContent } from '@tipward/design-model';
 import type { DesignInputs } from './load-inputs.ts';
 
-export const hashContent = (content: DesignContent): string =>
+const hashContent = (content: DesignContent): string =>
   createHash('sha256').update(canonicalJson(content)).digest('hex');
 
 /** The evaluation of record: the same package as in the browser, run here. */

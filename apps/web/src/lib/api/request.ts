@@ -28,7 +28,7 @@ interface LooseInput {
   readonly signal?: AbortSignal;
 }
 
-export const API_BASE = '/api/v1';
+const API_BASE = '/api/v1';
 
 /** Address of an operation with its parameters filled in and its query appended; empty query values are left out. */
 export function addressOf(operation: Operation, input: Pick<LooseInput, 'params' | 'query'>): string {

@@ -5,7 +5,6 @@ export const START_KINDS = [
   { kind: 'stations', label: 'From stations of a spreadsheet' },
   { kind: 'fork', label: 'From a version' },
 ] as const;
-export type StartKind = (typeof START_KINDS)[number]['kind'];
 
 /** Sizing begins at what the specification says: its design λ, and the chord limit among its requirements as the cap. */
 export function sizedDefaults(
