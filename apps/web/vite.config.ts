@@ -3,7 +3,8 @@ import react from '@vitejs/plugin-react';
 import { defaultClientConditions, defineConfig } from 'vite';
 import { slimContract } from './build/slim-operations.ts';
 
-const API = 'http://127.0.0.1:4310';
+/** The API that `npm run dev` serves. */
+const API = `http://127.0.0.1:${process.env['TIPWARD_PORT'] ?? '4310'}`;
 
 export default defineConfig({
   plugins: [slimContract(), react(), tailwindcss()],
