@@ -22,12 +22,15 @@ export function Tabs({
 }) {
   return (
     <Parts.Root value={value} onValueChange={onChange}>
-      <Parts.List aria-label={label} className="flex flex-wrap gap-5 border-b border-rule">
+      <Parts.List
+        aria-label={label}
+        className="flex gap-5 overflow-x-auto shadow-[inset_0_-1px_0_var(--rule)]"
+      >
         {tabs.map((tab) => (
           <Parts.Trigger
             key={tab.id}
             value={tab.id}
-            className="-mb-px min-h-8 cursor-pointer border-0 border-b-2 border-transparent bg-transparent px-0 text-ink-soft hover:text-ink data-[state=active]:border-accent data-[state=active]:font-medium data-[state=active]:text-ink"
+            className="min-h-8 shrink-0 cursor-pointer border-0 border-b-2 border-transparent bg-transparent px-0 text-ink-soft hover:text-ink data-[state=active]:border-accent data-[state=active]:font-medium data-[state=active]:text-ink"
           >
             {tab.label}
           </Parts.Trigger>

@@ -38,7 +38,7 @@ export function TableBody<Row>({
               className={classNames(
                 'px-2 py-0.5',
                 column.numeric === true && 'figures text-right whitespace-nowrap',
-                column.fill === true && 'w-full max-w-0 min-w-40 truncate',
+                column.fill === true && 'w-full max-w-0 min-w-32 truncate',
                 column.wideOnly === true && 'max-sm:hidden',
               )}
             >

@@ -33,7 +33,7 @@ export function AirfoilPage({ airfoilId }: { airfoilId: string }) {
           <Section title="Polars">
             <PolarTable airfoil={data} />
           </Section>
-          <div className="grid gap-x-10 xl:grid-cols-[minmax(0,2fr)_minmax(0,3fr)]">
+          <div className="grid grid-cols-[minmax(0,1fr)] gap-x-10 xl:grid-cols-[minmax(0,2fr)_minmax(0,3fr)]">
             <Section title="Outline">
               <OutlinePlot airfoil={data} />
             </Section>

@@ -45,7 +45,7 @@ export function PolarPlots({ airfoil }: { airfoil: Airfoil }) {
     .filter(({ surfaceState }) => surface === 'both' || surfaceState === surface)
     .map((polar) => within(polar, RANGES[range].domain));
   return (
-    <div className="flex flex-col gap-5">
+    <div className="flex flex-col gap-5 pr-8">
       <div className="no-print max-w-xl">
         <FieldGrid>
           <Select

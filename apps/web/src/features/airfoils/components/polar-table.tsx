@@ -99,7 +99,8 @@ const COLUMNS: Column<Row>[] = [
     id: 'source',
     header: 'Source',
     wideOnly: true,
-    cell: ({ polar }) => <span className="wrap-anywhere">{polar.source}</span>,
+    fill: true,
+    cell: ({ polar }) => <span title={polar.source}>{polar.source}</span>,
     text: ({ polar }) => polar.source,
   },
 ];

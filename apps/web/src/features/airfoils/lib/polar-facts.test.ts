@@ -39,6 +39,15 @@ describe('polarFacts', () => {
     ]);
   });
 
+  it('takes the maximum before stall, not the later rise of a flat plate', () => {
+    const stalled = alphaDeg.map((alpha) =>
+      alpha <= 9 ? 0.1 * alpha : alpha <= 14 ? 0.9 - 0.04 * (alpha - 9) : 0.7 + 0.06 * (alpha - 14),
+    );
+    const facts = polarFacts({ ...ideal, cl: stalled }, 18);
+    expect(facts.alphaAtMaxClDeg).toBe(9);
+    expect(facts.maxCl).toBeCloseTo(0.9, 9);
+  });
+
   it('asks no lift of a cylinder', () => {
     expect(polarFacts({ ...ideal, cl: alphaDeg.map(() => 0) }, 100).concerns).toEqual([]);
   });

@@ -53,13 +53,26 @@ function concernsOf(polar: PolarData, slopeShare: number | null, lifts: boolean)
   return concerns;
 }
 
+/** Lift falls by this much past the peak before it counts as stall; less is scatter. */
+const STALL_DROP = 0.02;
+
+/** Index of the first maximum of lift above α = 0: the rise of a stalled flat plate further on is no maximum of use. */
+function liftPeak({ alphaDeg, cl }: PolarData): number {
+  let best = Math.max(
+    0,
+    alphaDeg.findIndex((alpha) => alpha >= 0),
+  );
+  for (let i = best + 1; i < alphaDeg.length; i += 1) {
+    if ((cl[i] ?? 0) > (cl[best] ?? 0)) best = i;
+    if ((cl[i] ?? 0) < (cl[best] ?? 0) - STALL_DROP) break;
+  }
+  return best;
+}
+
 /** What makes a polar worth trusting, or not. `thicknessPct` 100 is a cylinder, which lifts nothing. */
 export function polarFacts(polar: PolarData, thicknessPct: number): PolarFacts {
   const near = polar.alphaDeg.flatMap((alpha, i) => (Math.abs(alpha) <= 30 ? [i] : []));
-  const peak = near.reduce(
-    (best, i) => ((polar.cl[i] ?? -Infinity) > (polar.cl[best] ?? -Infinity) ? i : best),
-    near[0] ?? 0,
-  );
+  const peak = liftPeak(polar);
   const ratios = near.flatMap((i) => {
     const drag = polar.cd[i] ?? 0;
     return drag > 0 ? [(polar.cl[i] ?? 0) / drag] : [];

@@ -127,10 +127,10 @@ function opener({ onOpenDraft, opening }: Choice): Column<VersionSummary>[] {
         onOpenDraft(id);
       }}
     >
-      Open a draft
+      Open
     </Button>
   );
-  return [{ id: 'open', header: 'Go on', cell }];
+  return [{ id: 'open', header: 'Draft', cell }];
 }
 
 export function versionColumns(choice: Choice): Column<VersionSummary>[] {
@@ -139,7 +139,7 @@ export function versionColumns(choice: Choice): Column<VersionSummary>[] {
     ...ABOUT,
     number('maxCp', 'Max CP', '', 'cp'),
     number('energyNetMWh', 'Energy, net', 'MWh', 'energyMWh'),
-    number('maxRootFlapMomentKNm', 'Root flap moment', 'kN·m', 'momentKNm'),
+    number('maxRootFlapMomentKNm', 'Root flap', 'kN·m', 'momentKNm'),
     ...MADE,
     ...opener(choice),
   ];

@@ -14,8 +14,7 @@ export function OpenDrafts() {
         {({ items }) =>
           items.length === 0 ? (
             <p className="m-0 py-1 text-ink-soft">
-              None. A draft opens from a design: ‘New design’ on a programme, or ‘Open a draft’ beside a
-              version.
+              None. A draft opens from a design: ‘New design’ on a programme, or ‘Open’ beside a version.
             </p>
           ) : (
             <ul className="m-0 list-none p-0">

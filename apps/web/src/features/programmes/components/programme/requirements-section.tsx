@@ -89,7 +89,7 @@ export function RequirementsSection({ programme }: { programme: Programme }) {
                 const { label, unit } = REQUIREMENT_KINDS[requirement.kind];
                 return (
                   <tr key={requirement.kind} className="h-7 border-b border-rule">
-                    <th scope="row" className="px-2 font-normal" title={requirement.reason}>
+                    <th scope="row" className="min-w-36 px-2 font-normal" title={requirement.reason}>
                       {label}
                       {unit !== '' && <span className="text-ink-soft">, {unit}</span>}
                     </th>

@@ -52,7 +52,7 @@ export function IssueView({
   const changes = before === undefined ? [] : specificationChanges(before, issue);
   const changeOf = (label: string) => changes.find(({ what }) => what === label);
   return (
-    <div className="grid items-start gap-x-12 xl:grid-cols-2">
+    <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-x-12 xl:grid-cols-2">
       <div>
         {FIELD_GROUPS.map((group) => (
           <Section key={group.title} title={group.title}>
