@@ -23,6 +23,8 @@ async function main() {
     ...serverEnvironment({ port, mailPort, database, secret: secrets.session, mode: 'demo' }),
     NODE_ENV: 'development',
     TIPWARD_PUBLIC_URL: URL_OF_WEB,
+    // Vite serves the web application; there may be no build of it.
+    WEB_DIST: undefined,
   };
   const signIns = await makeDemo(WATCHED, environment, database);
   noteDemoIsWhole();
