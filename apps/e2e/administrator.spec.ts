@@ -28,10 +28,7 @@ test('an administrator invites a person, who takes the invitation up from the ma
   await osk.goto((await link()) ?? '');
   await osk.getByLabel('Name').fill('Osk Ünal');
   await osk.getByLabel('Password').first().fill('a password long enough');
-  await osk
-    .getByRole('button', { name: /Accept|Take|Join|Sign in|Enter/u })
-    .last()
-    .click();
+  await osk.getByRole('button', { name: 'Set and sign in' }).click();
   await expect(osk.getByRole('heading', { level: 1, name: 'Programmes' })).toBeVisible();
   await expect(osk.getByRole('link', { name: 'Bittern 3200' })).toBeVisible();
   await expect(osk.getByRole('link', { name: 'Curlew 48' })).toHaveCount(0);
